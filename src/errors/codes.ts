@@ -1,0 +1,92 @@
+/**
+ * The closed table of fault codes. A code names the room and what is wrong; it never changes its meaning between
+ * versions. New codes are added in the section of their room, in alphabetical order.
+ */
+export const faultCodes = [
+  // any room
+  "input/forbidden-key",
+  "input/missing",
+  "input/not-an-array",
+  "input/not-an-object",
+  "input/not-finite",
+  "input/not-a-string",
+  "input/too-large",
+  "input/unknown-key",
+  "input/unknown-option",
+  // quantity
+  "quantity/below-absolute-zero",
+  "quantity/negative-uncertainty",
+  "quantity/not-a-quantity",
+  "quantity/not-finite",
+  "quantity/not-positive",
+  "quantity/overflow",
+  "quantity/syntax",
+  "quantity/unknown-unit",
+  "quantity/wrong-dimension",
+  // formula
+  "formula/ambiguous-dot",
+  "formula/charge-order",
+  "formula/empty",
+  "formula/no-atomic-weight",
+  "formula/syntax",
+  "formula/too-deep",
+  "formula/too-long",
+  "formula/unknown-element",
+  "formula/zero-count",
+  // heat-capacity
+  "heat-capacity/coefficient-count",
+  "heat-capacity/intervals",
+  "heat-capacity/no-anchor",
+  "heat-capacity/not-available",
+  "heat-capacity/outside-range",
+  "heat-capacity/unknown-form",
+  // species
+  "species/ambiguous",
+  "species/duplicate-label",
+  "species/inconsistent",
+  "species/invalid-record",
+  "species/model-missing",
+  "species/not-found",
+  "species/outside-range",
+  // fugacity
+  "fugacity/coefficient-function",
+  "fugacity/missing-critical-constants",
+  "fugacity/outside-validity",
+  "fugacity/unphysical",
+  // reaction
+  "reaction/empty",
+  "reaction/invalid",
+  "reaction/not-a-reaction",
+  "reaction/syntax",
+  "reaction/too-long",
+  "reaction/too-many-species",
+  "reaction/trivial",
+  "reaction/unbalanced",
+  "reaction/unknown-species",
+  // conditions
+  "conditions/duplicate-label",
+  "conditions/fractions-do-not-sum",
+  "conditions/invalid-fraction",
+  "conditions/missing-activity",
+  "conditions/missing-composition",
+  "conditions/missing-volume",
+  "conditions/pressure-mismatch",
+  "conditions/unknown-label",
+  "conditions/zero-activity",
+  // reaction: roots
+  "roots/empty-range",
+  "roots/not-bracketed",
+  // compiled
+  "compiled/length-mismatch",
+  "compiled/not-a-float-array",
+  // precision
+  "precision/digits",
+  "precision/not-available",
+  // checks
+  "checks/no-inputs",
+  // report
+  "report/no-rows",
+] as const;
+
+/** One of the closed set of fault codes. */
+export type FaultCode = (typeof faultCodes)[number];

@@ -1,0 +1,2 @@
+export { type Citation, type Reference, references } from "./bibliography.js";
+export type { Origin, Source } from "./source.js";
