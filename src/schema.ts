@@ -1,0 +1,1 @@
+export { quantitySchema } from "./quantity/schema.js";
