@@ -1,0 +1,177 @@
+import {
+  addDecimals,
+  decimalOf,
+  decimalRatioToNumber,
+  type ExactDecimal,
+  multiplyDecimals,
+  negateDecimal,
+  scaleDecimal,
+} from "../numeric/exact-decimal.js";
+import type { Rational } from "../numeric/rational.js";
+import {
+  basis,
+  type Columns,
+  columns,
+  type ExtraPower,
+  logarithmPlace,
+  placeOfPower,
+  temperatureLogarithmPlace,
+} from "./columns.js";
+import { type ExactSeries, intervalAt, lowerEndK, type PiecewiseSeries, upperEndK } from "./exact-series.js";
+
+/** A series with the coefficient it has in a sum, such as a stoichiometric number. */
+export interface WeightedSeries {
+  readonly coefficient: Rational;
+  readonly series: PiecewiseSeries;
+}
+
+/** Cp, H, S and G of one temperature interval, each as a linear combination of the basis. */
+export interface IntervalColumns {
+  readonly heatCapacity: Columns;
+  readonly enthalpy: Columns;
+  readonly entropy: Columns;
+  readonly gibbsEnergy: Columns;
+}
+
+/** A sum of series over temperature, rounded once and ready to evaluate. */
+export interface SeriesPlan {
+  readonly fromK: number;
+  readonly toK: number;
+  /** Upper ends of the intervals in kelvin, rising; an end belongs to its interval. */
+  readonly endsK: readonly number[];
+  readonly intervals: readonly IntervalColumns[];
+  readonly heatCapacityKnown: boolean;
+}
+
+const zero: ExactDecimal = { mantissa: 0n, exponent: 0 };
+const one: ExactDecimal = { mantissa: 1n, exponent: 0 };
+
+/**
+ * Sums series exactly, interval by interval over the range that all share, and rounds each coefficient once. The
+ * result depends neither on the order of the sum nor on how it is grouped.
+ *
+ * @returns undefined where the ranges do not meet
+ */
+export function mergeSeries(parts: readonly WeightedSeries[]): SeriesPlan | undefined {
+  const fromK = Math.max(...parts.map((part) => lowerEndK(part.series)));
+  const toK = Math.min(...parts.map((part) => upperEndK(part.series)));
+  if (!(fromK <= toK)) return undefined;
+  const endsK = commonEnds(parts, fromK, toK);
+  const denominator = parts.reduce((all, part) => leastCommonMultiple(all, part.coefficient.denominator), 1n);
+  const weights = parts.map(({ coefficient }) => coefficient.numerator * (denominator / coefficient.denominator));
+  return {
+    fromK,
+    toK,
+    endsK,
+    intervals: endsK.map((endK) =>
+      roundedColumns(sumOf(parts.map((part) => intervalAt(part.series, endK)), weights), denominator),
+    ),
+    heatCapacityKnown: parts.every((part) => part.series.heatCapacityKnown),
+  };
+}
+
+function commonEnds(parts: readonly WeightedSeries[], fromK: number, toK: number): number[] {
+  const ends = new Set([toK]);
+  for (const { series } of parts) {
+    for (const interval of series.intervals) {
+      if (interval.toK > fromK && interval.toK < toK) ends.add(interval.toK);
+    }
+  }
+  return [...ends].sort((a, b) => a - b);
+}
+
+interface SeriesSum {
+  readonly terms: ReadonlyMap<number, ExactDecimal>;
+  readonly enthalpyConstant: ExactDecimal;
+  readonly entropyConstant: ExactDecimal;
+}
+
+function sumOf(intervals: readonly ExactSeries[], weights: readonly bigint[]): SeriesSum {
+  const terms = new Map<number, ExactDecimal>();
+  let enthalpyConstant = zero;
+  let entropyConstant = zero;
+  intervals.forEach((interval, index) => {
+    const weight = weights[index]!;
+    for (const { exponent, coefficient } of interval.terms) {
+      terms.set(exponent, addDecimals(terms.get(exponent) ?? zero, scaleDecimal(coefficient, weight)));
+    }
+    enthalpyConstant = addDecimals(enthalpyConstant, scaleDecimal(interval.enthalpyConstant, weight));
+    entropyConstant = addDecimals(entropyConstant, scaleDecimal(interval.entropyConstant, weight));
+  });
+  return { terms, enthalpyConstant, entropyConstant };
+}
+
+/**
+ * The integrals of the summed terms. For c T^n: H has c T^(n+1)/(n+1) and S has c T^n/n, logarithms where a divisor
+ * is zero, and G = H - T S.
+ */
+function roundedColumns(sum: SeriesSum, denominator: bigint): IntervalColumns {
+  const heatCapacity = draft();
+  const enthalpy = draft();
+  const entropy = draft();
+  const gibbsEnergy = draft();
+  const setPlace = (target: ColumnDraft, place: number, value: ExactDecimal): void => {
+    target.fixed[place] = decimalRatioToNumber(value, { mantissa: denominator, exponent: 0 });
+  };
+  const addPower = (target: ColumnDraft, exponent: number, value: ExactDecimal, divisor: ExactDecimal): void => {
+    const coefficient = decimalRatioToNumber(value, scaleDecimal(divisor, denominator));
+    const place = placeOfPower(exponent);
+    if (place === undefined) target.extras.push({ exponent, coefficient });
+    else target.fixed[place] = coefficient;
+  };
+  let gibbsConstant = sum.enthalpyConstant;
+  let gibbsSlope = negateDecimal(sum.entropyConstant);
+  setPlace(enthalpy, 0, sum.enthalpyConstant);
+  setPlace(entropy, 0, sum.entropyConstant);
+  for (const [exponent, c] of sum.terms) {
+    if (c.mantissa === 0n) continue;
+    addPower(heatCapacity, exponent, c, one);
+    if (exponent === 0) {
+      setPlace(enthalpy, 1, c);
+      setPlace(entropy, logarithmPlace, c);
+      setPlace(gibbsEnergy, temperatureLogarithmPlace, negateDecimal(c));
+      gibbsSlope = addDecimals(gibbsSlope, c);
+    } else if (exponent === -1) {
+      setPlace(enthalpy, logarithmPlace, c);
+      addPower(entropy, -1, negateDecimal(c), one);
+      setPlace(gibbsEnergy, logarithmPlace, c);
+      gibbsConstant = addDecimals(gibbsConstant, c);
+    } else {
+      const n = decimalOf(exponent);
+      const next = addDecimals(n, one);
+      addPower(enthalpy, exponent + 1, c, next);
+      addPower(entropy, exponent, c, n);
+      addPower(gibbsEnergy, exponent + 1, negateDecimal(c), multiplyDecimals(n, next));
+    }
+  }
+  setPlace(gibbsEnergy, 0, gibbsConstant);
+  setPlace(gibbsEnergy, 1, gibbsSlope);
+  return {
+    heatCapacity: finished(heatCapacity),
+    enthalpy: finished(enthalpy),
+    entropy: finished(entropy),
+    gibbsEnergy: finished(gibbsEnergy),
+  };
+}
+
+interface ColumnDraft {
+  readonly fixed: Float64Array;
+  readonly extras: ExtraPower[];
+}
+
+function draft(): ColumnDraft {
+  return { fixed: new Float64Array(basis.length), extras: [] };
+}
+
+function finished({ fixed, extras }: ColumnDraft): Columns {
+  return columns(
+    fixed,
+    extras.sort((a, b) => a.exponent - b.exponent),
+  );
+}
+
+function leastCommonMultiple(a: bigint, b: bigint): bigint {
+  let [x, y] = [a, b];
+  while (y !== 0n) [x, y] = [y, x % y];
+  return (a / x) * b;
+}
