@@ -45,6 +45,7 @@ export const faultCodes = [
   "heat-capacity/no-anchor",
   "heat-capacity/not-available",
   "heat-capacity/outside-range",
+  "heat-capacity/overflow",
   "heat-capacity/unknown-form",
   // species
   "species/ambiguous",
@@ -63,6 +64,7 @@ export const faultCodes = [
   "fugacity/outside-validity",
   "fugacity/unphysical",
   // reaction
+  "reaction/coefficient-out-of-range",
   "reaction/constant-out-of-range",
   "reaction/empty",
   "reaction/invalid",
@@ -88,6 +90,7 @@ export const faultCodes = [
   // compiled
   "compiled/length-mismatch",
   "compiled/not-a-float-array",
+  "compiled/overlapping-arrays",
   // precision
   "precision/digits",
   "precision/not-available",

@@ -139,7 +139,8 @@ export function checkArray(
     });
     return undefined;
   }
-  if (value.length <= longest) return value;
+  // A copy without holes: what stands nowhere is visited as undefined.
+  if (value.length <= longest) return Array.from(value);
   faults.push({
     code: "input/too-large",
     path,

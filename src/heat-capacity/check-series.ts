@@ -1,4 +1,4 @@
-import { cut, type Fault, type FaultPath } from "../errors/fault.js";
+import { describeReceived, type Fault, type FaultPath } from "../errors/fault.js";
 import { checkArray, checkNumber, checkObject, checkOption } from "../errors/input.js";
 import { checkFigure } from "../quantity/check-figure.js";
 import { checkForm } from "./forms.js";
@@ -22,7 +22,7 @@ export function checkSeries(
   faults: Fault[],
 ): void {
   const before = faults.length;
-  checkOption(members.kind, [...path, "kind"], faults, ["series"]);
+  if (members.kind !== undefined) checkOption(members.kind, [...path, "kind"], faults, ["series"]);
   if (members.form !== undefined && typeof members.form !== "string") {
     faults.push({ code: "heat-capacity/unknown-form", path: [...path, "form"], message: "the form is not a text" });
   }
@@ -101,7 +101,8 @@ function checkShifts(value: unknown, path: FaultPath, faults: Fault[]): void {
     faults.push({
       code: "input/unknown-option",
       path: [...path, index],
-      message: `a decimal shift is a whole number from -30 to 30, got ${cut(String(entry))}`,
+      message: `a decimal shift is a whole number from -30 to 30, got ${describeReceived(entry)}`,
+      received: describeReceived(entry),
       expected: "3 where the heading says x 10^3",
     });
   });

@@ -1,3 +1,5 @@
+import { type CompensatedPair, twoProduct, twoSum } from "../numeric/compensated.js";
+
 /**
  * The basis that every integral of a heat-capacity series is written in. The first thirteen functions have a place of
  * their own because the published forms use them; any other power of T, a multiple of 1/2, is an extra.
@@ -102,28 +104,39 @@ export function absoluteTerms(combination: Columns, temperatureK: number, lnTemp
 }
 
 function basisValue(place: number, temperatureK: number, logarithm: number): number {
-  if (place <= 5) return wholePower(temperatureK, place);
-  if (place <= 8) return wholePower(temperatureK, 5 - place);
+  if (place <= 5) return powerOf(temperatureK, place);
+  if (place <= 8) return powerOf(temperatureK, 5 - place);
   if (place === logarithmPlace) return logarithm;
   if (place === temperatureLogarithmPlace) return temperatureK * logarithm;
   const root = Math.sqrt(temperatureK);
   return place === rootPlace ? root : 1 / root;
 }
 
-/** T^n for n a multiple of 1/2: by squaring, with one square root for half-integers. */
+/** T^n for n a multiple of 1/2, within 1 eps: by squaring in pairs of doubles, for squares double their error. */
 function powerOf(temperatureK: number, exponent: number): number {
   const below = Math.floor(exponent);
-  return exponent === below
-    ? wholePower(temperatureK, exponent)
-    : wholePower(temperatureK, below) * Math.sqrt(temperatureK);
+  let power = wholePower(temperatureK, Math.abs(below));
+  if (below < 0) power = reciprocal(power);
+  return exponent === below ? power.value : power.value * Math.sqrt(temperatureK);
 }
 
-function wholePower(base: number, exponent: number): number {
-  let result = 1;
-  let square = base;
-  for (let rest = Math.abs(exponent); rest > 0; rest = Math.floor(rest / 2)) {
-    if (rest % 2 === 1) result *= square;
-    square *= square;
+function wholePower(base: number, exponent: number): CompensatedPair {
+  let result: CompensatedPair = { value: 1, error: 0 };
+  let square: CompensatedPair = { value: base, error: 0 };
+  for (let rest = exponent; rest > 0; rest = Math.floor(rest / 2)) {
+    if (rest % 2 === 1) result = productOf(result, square);
+    if (rest > 1) square = productOf(square, square);
   }
-  return exponent < 0 ? 1 / result : result;
+  return result;
+}
+
+function productOf(a: CompensatedPair, b: CompensatedPair): CompensatedPair {
+  const { value, error } = twoProduct(a.value, b.value);
+  return twoSum(value, error + (a.value * b.error + a.error * b.value));
+}
+
+function reciprocal({ value, error }: CompensatedPair): CompensatedPair {
+  const first = 1 / value;
+  const product = twoProduct(first, value);
+  return twoSum(first, first * (1 - product.value - product.error - first * error));
 }

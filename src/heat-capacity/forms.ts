@@ -108,14 +108,25 @@ export function checkForm(published: PublishedSeries, path: FaultPath, faults: F
   if (!adapter.needsGasConstant && published.gasConstant !== undefined) {
     refuseKey("gasConstant", published.form, path, faults);
   }
+  const shifts = published.decimalShifts;
   const counts = published.form === "polynomial" ? [powers?.length ?? 0] : adapter.counts;
   published.intervals.forEach((interval, index) => {
-    if (counts.includes(interval.coefficients.length)) return;
+    const count = interval.coefficients.length;
+    if (shifts !== undefined && shifts.length !== count) {
+      faults.push({
+        code: "heat-capacity/coefficient-count",
+        path: [...path, "decimalShifts"],
+        message: `interval ${index} has ${count} coefficients, decimalShifts has ${shifts.length} entries`,
+        received: String(shifts.length),
+        expected: String(count),
+      });
+    }
+    if (counts.includes(count)) return;
     faults.push({
       code: "heat-capacity/coefficient-count",
       path: [...path, "intervals", index, "coefficients"],
       message: `the ${published.form} form has ${counts.join(" or ")} coefficients an interval`,
-      received: String(interval.coefficients.length),
+      received: String(count),
       expected: counts.join(" or "),
     });
   });

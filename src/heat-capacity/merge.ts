@@ -1,3 +1,4 @@
+import { fail } from "../errors/gibbs-ledger-error.js";
 import {
   addDecimals,
   decimalOf,
@@ -7,8 +8,10 @@ import {
   negateDecimal,
   scaleDecimal,
 } from "../numeric/exact-decimal.js";
+import { log } from "../numeric/log.js";
 import type { Rational } from "../numeric/rational.js";
 import {
+  absoluteTerms,
   basis,
   type Columns,
   columns,
@@ -59,16 +62,41 @@ export function mergeSeries(parts: readonly WeightedSeries[]): SeriesPlan | unde
   const endsK = commonEnds(parts, fromK, toK);
   const denominator = parts.reduce((all, part) => leastCommonMultiple(all, part.coefficient.denominator), 1n);
   const weights = parts.map(({ coefficient }) => coefficient.numerator * (denominator / coefficient.denominator));
+  const intervals = endsK.map((endK) =>
+    roundedColumns(sumOf(parts.map((part) => intervalAt(part.series, endK)), weights), denominator),
+  );
+  intervals.forEach((interval, index) => {
+    refuseOverflow(interval, index === 0 ? fromK : endsK[index - 1]!, endsK[index]!);
+  });
   return {
     fromK,
     toK,
     endsK,
-    intervals: endsK.map((endK) =>
-      roundedColumns(sumOf(parts.map((part) => intervalAt(part.series, endK)), weights), denominator),
-    ),
+    intervals,
     heatCapacityKnown: parts.every((part) => part.series.heatCapacityKnown),
   };
 }
+
+/**
+ * Each term is greatest at an end of its interval (or, |T ln T| below 1 K, smaller than the coefficient), so that
+ * sums of absolute terms that a double holds there are held in between.
+ */
+function refuseOverflow(interval: IntervalColumns, fromK: number, toK: number): void {
+  for (const combination of Object.values(interval)) {
+    for (const temperatureK of [fromK, toK]) {
+      if (absoluteTerms(combination, temperatureK, log(temperatureK)) < largestSum) continue;
+      fail({
+        code: "heat-capacity/overflow",
+        path: [],
+        message: `the terms of a series are too large for a double at ${temperatureK} K`,
+        expected: `terms whose sum is below ${largestSum}`,
+      });
+    }
+  }
+}
+
+/** Room for the factors of a conversion. */
+const largestSum = 1e300;
 
 function commonEnds(parts: readonly WeightedSeries[], fromK: number, toK: number): number[] {
   const ends = new Set([toK]);

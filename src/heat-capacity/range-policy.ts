@@ -28,17 +28,26 @@ export function rangePolicy(policy: RangePolicy | undefined): RangePolicy {
   return policy;
 }
 
-/** A series made to reach from 0 K (excluded) up without end, as the policy says; a reference point stays a point. */
+/** Where any continuation ends: beyond lies no chemistry, and powers of the temperature would overflow a double. */
+const lowestContinuedK = 1;
+const highestContinuedK = 100_000;
+
+/** The hint of a fault outside a range. */
+export const policyHint: string =
+  'outsideRange: "constant-heat-capacity" or "continue-fit" goes on beyond, from 1 K to 100,000 K';
+
+/** A series made to reach from 1 K to 100,000 K, as the policy says; a reference point stays a point. */
 export function extendSeries(series: PiecewiseSeries, policy: RangePolicy): PiecewiseSeries {
   if (policy === "refuse" || !series.heatCapacityKnown) return series;
-  const below = policy === "continue-fit" ? series.intervals[0]! : constantFrom(series, lowerEndK(series));
-  const above = policy === "continue-fit" ? series.intervals.at(-1)! : constantFrom(series, upperEndK(series));
+  const [startK, endK] = [lowerEndK(series), upperEndK(series)];
+  const below = policy === "continue-fit" ? series.intervals[0]! : constantFrom(series, startK);
+  const above = policy === "continue-fit" ? series.intervals.at(-1)! : constantFrom(series, endK);
   return {
     ...series,
     intervals: [
-      { ...below, fromK: 0, toK: lowerEndK(series) },
+      ...(startK > lowestContinuedK ? [{ ...below, fromK: lowestContinuedK, toK: startK }] : []),
       ...series.intervals,
-      { ...above, fromK: upperEndK(series), toK: Number.POSITIVE_INFINITY },
+      ...(endK < highestContinuedK ? [{ ...above, fromK: endK, toK: highestContinuedK }] : []),
     ],
   };
 }

@@ -170,7 +170,7 @@ function transitionEnthalpy(temperatureK: number, context: SeriesContext): Exact
     context.transitionEnthalpies?.get(temperatureK) ??
     fail({
       code: "heat-capacity/no-anchor",
-      path: ["transitions"],
+      path: ["series", "intervals"],
       message: `the fit ends at a first-order transition at ${temperatureK} K whose enthalpy is not given`,
       expected: `a transition at ${temperatureK} K with its enthalpy`,
     })
@@ -180,7 +180,7 @@ function transitionEnthalpy(temperatureK: number, context: SeriesContext): Exact
 function noAnchor(published: PublishedSeries): never {
   return fail({
     code: "heat-capacity/no-anchor",
-    path: ["anchor"],
+    path: ["series", "anchor"],
     message: `the ${published.form} form carries no constants of integration`,
     expected: "an anchor, or the enthalpy of formation and the entropy at 298.15 K",
   });
@@ -189,7 +189,7 @@ function noAnchor(published: PublishedSeries): never {
 function noAnchorInside({ intervals }: PublishedSeries, anchor: Anchor): never {
   return fail({
     code: "heat-capacity/no-anchor",
-    path: ["anchor", "temperature"],
+    path: ["series", "anchor", "temperature"],
     message: `the anchor at ${anchor.temperatureK} K lies outside the fit, ${intervals[0]!.from} K to ${intervals.at(-1)!.to} K`,
     expected: "an anchor at a temperature within the intervals",
   });

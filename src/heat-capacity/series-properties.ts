@@ -9,7 +9,7 @@ import { evaluateAll, intervalIndex, roundingBound, type SeriesFunction } from "
 import { lowerEndK, type PiecewiseSeries, upperEndK } from "./exact-series.js";
 import type { PublishedSeries } from "./published-series.js";
 import { type PlannedSeries, plannedSeries, planOfSeries } from "./planned-series.js";
-import { type RangePolicy, rangePolicy } from "./range-policy.js";
+import { policyHint, type RangePolicy, rangePolicy } from "./range-policy.js";
 import { anchorOfFigures, readSeries } from "./read-series.js";
 
 /** At what temperature a fit is evaluated, and what to do outside its range. */
@@ -108,6 +108,6 @@ function failOutside(series: PiecewiseSeries, temperatureK: number): never {
     message: `the fit reaches from ${range}, not to ${cut(String(temperatureK))} K`,
     received: `${temperatureK} K`,
     expected: range,
-    hint: 'outsideRange: "constant-heat-capacity" or "continue-fit" goes on beyond',
+    hint: policyHint,
   });
 }

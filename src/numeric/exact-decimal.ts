@@ -14,6 +14,9 @@ const numeral = /^([+-]?)(?:(\d+)(?:\.(\d*))?|\.(\d+))(?:[eE]([+-]?\d{1,4}))?$/;
 /** The longest numeral that is read, in characters. */
 const longestNumeral = 10_000;
 
+/** 2^55: a quotient in units of 2^-1076 below it is a double below 2^-1021. */
+const twoTo55 = 36028797018963968n;
+
 /** Powers of ten that a double holds exactly, 10^0 to 10^22. */
 const exactPowersOfTen: readonly number[] = [
   1, 1e1, 1e2, 1e3, 1e4, 1e5, 1e6, 1e7, 1e8, 1e9, 1e10, 1e11, 1e12, 1e13, 1e14, 1e15, 1e16, 1e17, 1e18, 1e19, 1e20,
@@ -161,25 +164,25 @@ export function roundRatio(numerator: bigint, denominator: bigint): number {
   const negative = n < 0 !== d < 0;
   const top = n < 0 ? -numerator : numerator;
   const bottom = d < 0 ? -denominator : denominator;
-  // The quotient of top * 2^shift has 64 to 66 bits; where the result is subnormal, its unit is 2^-1076.
+  // The quotient of top * 2^shift has at least 60 bits, unless the unit 2^-1076 cuts it short.
   const wanted = 65 - (bitLength(top, Math.abs(n)) - bitLength(bottom, Math.abs(d)));
-  if (wanted < -961) return negative ? Number.NEGATIVE_INFINITY : Number.POSITIVE_INFINITY;
-  if (wanted > 1076 + 66) return 0;
+  if (wanted < -970) return negative ? Number.NEGATIVE_INFINITY : Number.POSITIVE_INFINITY;
+  if (wanted > 1200) return 0;
   const shift = Math.min(wanted, 1076);
   const dividend = shift > 0 ? top << BigInt(shift) : top;
   const divisor = shift < 0 ? bottom << BigInt(-shift) : bottom;
   const quotient = dividend / divisor;
-  // The last bit says "inexact": it settles every tie that is none.
+  // The last bit says "inexact": what looks like a tie and is none is rounded the right way.
   const sticky = quotient * divisor === dividend ? quotient : quotient | 1n;
   let magnitude: number;
-  if (shift === 1076 && sticky < 1n << 55n) {
-    // Two bits below the unit 2^-1074: round by hand, the product is then exact.
+  if (shift === 1076 && sticky < twoTo55) {
+    // The unit in the last place is 2^-1074, two bits up: round by hand, the product is then exact.
     const rest = sticky & 3n;
     let units = sticky >> 2n;
     if (rest === 3n || (rest === 2n && (units & 1n) === 1n)) units += 1n;
     magnitude = Number(units) * Number.MIN_VALUE;
   } else {
-    // Number() of a BigInt rounds to nearest, ties to even; powers of two are exact here.
+    // Number() of a BigInt rounds to nearest, ties to even; the products with powers of two are exact.
     const half = Math.trunc(-shift / 2);
     magnitude = Number(sticky) * powerOfTwo(half) * powerOfTwo(-shift - half);
   }

@@ -2,7 +2,7 @@ import { describeReceived, type Fault, type FaultPath } from "../errors/fault.js
 import { fail, failIfAny } from "../errors/gibbs-ledger-error.js";
 import { forbiddenKeys } from "../errors/input.js";
 import { belowAbsoluteZero, checkParts, lowestValue, overflow } from "./check-parts.js";
-import { convertValue } from "./convert-value.js";
+import { type Conversion, conversionOf, convertBy, convertValue } from "./convert-value.js";
 import { type Dimension, isUnitCode, siUnits, type UnitCode } from "./units.js";
 
 interface Reading {
@@ -15,6 +15,10 @@ interface Reading {
 const celsiusZeroLow = 2.2737367544323207e-14;
 /** 2^-100: bound of the error of the terms below the sum, relative to the larger of its parts. */
 const uncertain = 7.888609052210118e-31;
+
+/** Conversions to kelvin, made at first use. */
+let fahrenheit: Conversion | undefined;
+let rankine: Conversion | undefined;
 
 const quantityKeys: readonly string[] = ["value", "unit", "standardUncertainty"];
 
@@ -36,8 +40,12 @@ export function temperatureInKelvin(value: unknown, ...path: (string | number)[]
   if (typeof number === "number") {
     if (unit === "K") {
       if (number > 0 && number < Infinity) return number;
-    } else if (unit === "Cel" && number > -273.15 && number < Infinity) {
-      return kelvinOfCelsius(number);
+    } else if (unit === "Cel") {
+      if (number > -273.15 && number < Infinity) return kelvinOfCelsius(number);
+    } else if (unit === "[degF]") {
+      if (number > -459.67 && number < Infinity) return convertBy((fahrenheit ??= conversionOf(unit, "K")), number);
+    } else if (unit === "[degR]" && number > 0 && number < Infinity) {
+      return convertBy((rankine ??= conversionOf(unit, "K")), number);
     }
   }
   return positive(number, unit, "temperature", path);

@@ -16,18 +16,21 @@ export type PublishedGibbsFunction =
 /** The check that computed a witness; each is a function of the room checks. */
 export type WitnessCheckName =
   | "closure-at-breaks"
-  | "enthalpy-at-298.15-K"
   | "entropy-at-298.15-K"
-  | "heat-content-at-298.15-K"
-  | "tabulated-entropy"
   | "tabulated-heat-capacity"
+  | "tabulated-entropy"
   | "tabulated-enthalpy-increment"
   | "statistical-mechanics-entropy"
-  | "transition-temperature"
+  | "statistical-mechanics-heat-content"
+  | "enthalpy-at-298.15-K"
+  | "reaction-enthalpy"
+  | "dissociation-energy"
+  | "equilibrium-constant"
   | "equilibrium-pressure"
   | "critical-compressibility"
   | "acentric-factor-from-boiling-point"
-  | "unit-cell-volume";
+  | "unit-cell-volume"
+  | "molar-volume-from-density";
 
 /** The group of figures that a witness speaks for. */
 export type WitnessGroup = "caloric" | "formation" | "critical" | "volume";
@@ -40,6 +43,8 @@ export interface Witness {
   readonly check: WitnessCheckName;
   /** Figures from outside the record that the check compares with, by name. */
   readonly against?: Readonly<Record<string, Figure>>;
+  /** Stoichiometric numbers by label, products positive, where the check is about a reaction. */
+  readonly reaction?: Readonly<Record<Label, number>>;
   /** What the check computes, in its own unit. */
   readonly deviation: number;
   /** The largest deviation that confirms. */

@@ -1,0 +1,88 @@
+import { cut, type Fault, type FaultPath } from "../errors/fault.js";
+import { fail } from "../errors/gibbs-ledger-error.js";
+import { evaluateAll, intervalIndex } from "../heat-capacity/evaluate.js";
+import { policyHint, type RangePolicy, rangePolicy } from "../heat-capacity/range-policy.js";
+import { temperatureInKelvin } from "../quantity/guards.js";
+import type { Quantity, Temperature } from "../quantity/quantity.js";
+import { houseRecord } from "./house-record.js";
+import type { Label, SpeciesRecord } from "./record.js";
+import { speciesPlan } from "./species-function.js";
+
+/** At what temperature, and what to do outside a record's range. */
+export interface StandardConditions {
+  /** Above 0 K. */
+  readonly temperature: Temperature;
+  /** `"refuse"` when absent. */
+  readonly outsideRange?: RangePolicy;
+}
+
+/** Properties of a substance in its standard state at 1 bar, per mole. */
+export interface StandardProperties {
+  /** Cp; absent where the record publishes H and S at 298.15 K only. */
+  readonly heatCapacity?: Quantity<"molarEntropy", "J/mol/K">;
+  /** H relative to the elements in their reference phases at 298.15 K. */
+  readonly enthalpy: Quantity<"molarEnergy", "J/mol">;
+  readonly entropy: Quantity<"molarEntropy", "J/mol/K">;
+  /** H - T S, H relative to the elements at 298.15 K; not the Gibbs energy of formation. */
+  readonly gibbsEnergy: Quantity<"molarEnergy", "J/mol">;
+  /** The label, where it was evaluated outside its range. */
+  readonly outsideRange: readonly Label[];
+}
+
+const noLabels: readonly Label[] = Object.freeze([]);
+
+/**
+ * Heat capacity, enthalpy, entropy and Gibbs energy of one species in its standard state (ideal gas at 1 bar, pure
+ * phase at 1 bar) from its published series, with analytic integrals.
+ *
+ * @param species - a record; one that is not of the house is checked, copied and frozen once
+ * @param conditions - temperature above 0 K, within the record's range unless `outsideRange` says otherwise
+ * @throws GibbsLedgerError "species/outside-range", "quantity/wrong-dimension", and every fault of a wrong record
+ * @remarks Arithmetic: within 4 eps of the sum of the absolute terms of the series.
+ * @example
+ * import { Ar_g } from "gibbs-ledger/data";
+ * const argon = standardProperties(Ar_g, { temperature: quantity(298.15, "K") });
+ * argon.entropy.value; // => 154.84...
+ * argon.heatCapacity?.value; // => 20.78...
+ */
+export function standardProperties(species: SpeciesRecord, conditions: StandardConditions): StandardProperties {
+  const record = houseRecord(species, ["species"]);
+  const temperatureK = temperatureInKelvin(conditions?.temperature, "temperature");
+  const policy = rangePolicy(conditions.outsideRange);
+  const plan = speciesPlan(record, policy);
+  const index = intervalIndex(plan, temperatureK);
+  if (index < 0) return failOutsideRange(record, temperatureK, ["temperature"]);
+  const values = evaluateAll(plan, index, temperatureK);
+  return {
+    ...(plan.heatCapacityKnown ? { heatCapacity: { value: values.heatCapacity, unit: "J/mol/K" } as const } : {}),
+    enthalpy: { value: values.enthalpy, unit: "J/mol" },
+    entropy: { value: values.entropy, unit: "J/mol/K" },
+    gibbsEnergy: { value: values.gibbsEnergy, unit: "J/mol" },
+    outsideRange: isInRange(record, temperatureK) ? noLabels : [record.label],
+  };
+}
+
+/** Whether a temperature lies in the range of a record of the house. */
+export function isInRange(record: SpeciesRecord, temperatureK: number): boolean {
+  const plan = speciesPlan(record, "refuse");
+  return temperatureK >= plan.fromK && temperatureK <= plan.toK;
+}
+
+/** The fault of a temperature outside a record's range. */
+export function failOutsideRange(record: SpeciesRecord, temperatureK: number, path: FaultPath): never {
+  return fail(outsideRangeFault(record, temperatureK, path));
+}
+
+/** Describes that a temperature lies outside a record's range. */
+export function outsideRangeFault(record: SpeciesRecord, temperatureK: number, path: FaultPath): Fault {
+  const { fromK, toK } = speciesPlan(record, "refuse");
+  const range = fromK === toK ? `only at ${fromK} K` : `from ${fromK} K to ${toK} K`;
+  return {
+    code: "species/outside-range",
+    path,
+    message: `${cut(record.label, 40)} is known ${range}, not at ${temperatureK} K`,
+    received: `${temperatureK} K`,
+    expected: range,
+    ...(fromK === toK ? {} : { hint: policyHint }),
+  };
+}
