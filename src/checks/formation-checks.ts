@@ -1,0 +1,93 @@
+import { gasConstantJPerMolK, referenceTemperatureK, standardPressurePa } from "../constants/constants.js";
+import { exp } from "../numeric/exp.js";
+import { log } from "../numeric/log.js";
+import { log10 } from "../numeric/log10.js";
+import type { CollectionData, SpeciesRecord, Witness } from "../species/record.js";
+import { rowsByTemperature } from "./caloric-checks.js";
+import { largest } from "./largest.js";
+import { propertiesOf } from "./properties-of.js";
+import { missing, optionalInput, requiredFigure, requiredInput } from "./witness-inputs.js";
+
+/** H(298.15 K) of the fit less the record's formation enthalpy, or the `formationEnthalpy` compared with; J/mol. */
+export function enthalpyAtReference(record: SpeciesRecord, witness: Witness): number {
+  const expected =
+    optionalInput(witness, "formationEnthalpy") ??
+    requiredFigure(record, witness.check, "formationEnthalpy", record.formationEnthalpy);
+  return propertiesOf(record, referenceTemperatureK).enthalpy - expected;
+}
+
+/** Enthalpy of a reaction at 298.15 K less the measured `reactionEnthalpy`; J/mol. */
+export function reactionEnthalpy(record: SpeciesRecord, witness: Witness, collection: CollectionData): number {
+  const computed = sumOver(
+    termsOf(record, witness, collection),
+    (species) => propertiesOf(species, referenceTemperatureK).enthalpy,
+  );
+  return computed - requiredInput(record, witness, "reactionEnthalpy");
+}
+
+/** Enthalpy of dissociation at 0 K from H(298.15 K) and H(298.15 K) - H(0 K), less `dissociationEnergy`; J/mol. */
+export function dissociationEnergy(record: SpeciesRecord, witness: Witness, collection: CollectionData): number {
+  const computed = sumOver(
+    termsOf(record, witness, collection),
+    (species) =>
+      propertiesOf(species, referenceTemperatureK).enthalpy -
+      requiredFigure(species, witness.check, "enthalpyAbove0K", species.enthalpyAbove0K),
+  );
+  return computed - requiredInput(record, witness, "dissociationEnergy");
+}
+
+/**
+ * log10 K of a reaction of ideal gases and pure phases less measured values, the largest over rows named as "700 K".
+ * `unitPressure` is the unit in which the measured K has its partial pressures.
+ */
+export function equilibriumConstant(record: SpeciesRecord, witness: Witness, collection: CollectionData): number {
+  const terms = termsOf(record, witness, collection);
+  const gases = sumOver(terms, (species) => (species.state === "g" ? 1 : 0));
+  const shift = gases * log10(requiredInput(record, witness, "unitPressure") / standardPressurePa);
+  const perDecade = gasConstantJPerMolK * log(10);
+  return largest(
+    rowsByTemperature(record, witness).map(([temperatureK, measured]) => {
+      const gibbsEnergy = sumOver(terms, (species) => propertiesOf(species, temperatureK).gibbsEnergy);
+      return -gibbsEnergy / (perDecade * temperatureK) - (measured + shift);
+    }),
+  );
+}
+
+/**
+ * Relative deviation of the equilibrium pressure of the one gas of a reaction of pure phases from measured ones, the
+ * largest over rows named as "1000 K": ln(f / p0) = -dG/RT + dV (p - p0)/RT over the condensed phases, and
+ * ln f = ln p + B p / RT with the gas's `secondVirialCoefficient`, or f = p without it.
+ */
+export function equilibriumPressure(record: SpeciesRecord, witness: Witness, collection: CollectionData): number {
+  const terms = termsOf(record, witness, collection);
+  const gases = terms.filter(([species]) => species.state === "g");
+  if (gases.length !== 1 || gases[0]![1] !== 1) return missing(record, witness.check, "one mole of one gas formed");
+  const condensedVolume = sumOver(terms, (species) =>
+    species.state === "g" ? 0 : requiredFigure(species, witness.check, "molar volume", species.volume?.molar),
+  );
+  const virial = optionalInput(witness, "secondVirialCoefficient") ?? 0;
+  return largest(
+    rowsByTemperature(record, witness).map(([temperatureK, measuredPa]) => {
+      const thermal = gasConstantJPerMolK * temperatureK;
+      const gibbsEnergy = sumOver(terms, (species) => propertiesOf(species, temperatureK).gibbsEnergy);
+      const volumeWork = condensedVolume * (measuredPa - standardPressurePa);
+      const lnRatio = -(gibbsEnergy + volumeWork + virial * measuredPa) / thermal;
+      return (standardPressurePa / measuredPa) * exp(lnRatio) - 1;
+    }),
+  );
+}
+
+type Term = readonly [species: SpeciesRecord, stoichiometricNumber: number];
+
+function termsOf(record: SpeciesRecord, witness: Witness, collection: CollectionData): Term[] {
+  const entries = Object.entries(witness.reaction ?? {});
+  if (entries.length === 0) return missing(record, witness.check, "a reaction");
+  return entries.map(([label, stoichiometricNumber]) => {
+    const species = label === record.label ? record : collection.species.find((other) => other.label === label);
+    return [species ?? missing(record, witness.check, `a record of ${label}`), stoichiometricNumber];
+  });
+}
+
+function sumOver(terms: readonly Term[], property: (species: SpeciesRecord) => number): number {
+  return terms.reduce((sum, [species, stoichiometricNumber]) => sum + stoichiometricNumber * property(species), 0);
+}

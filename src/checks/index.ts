@@ -1,0 +1,1 @@
+export { computeWitness, type RecomputedWitness, recomputeWitnesses } from "./witness-checks.js";

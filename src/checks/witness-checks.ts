@@ -1,0 +1,87 @@
+import type { CollectionData, SpeciesRecord, Witness, WitnessCheckName } from "../species/record.js";
+import {
+  closureAtBreaks,
+  entropyAtReference,
+  statisticalMechanicsEntropy,
+  statisticalMechanicsHeatContent,
+  tabulatedEnthalpyIncrement,
+  tabulatedEntropy,
+  tabulatedHeatCapacity,
+} from "./caloric-checks.js";
+import { acentricFactorFromBoilingPoint, criticalCompressibility } from "./critical-checks.js";
+import {
+  dissociationEnergy,
+  enthalpyAtReference,
+  equilibriumConstant,
+  equilibriumPressure,
+  reactionEnthalpy,
+} from "./formation-checks.js";
+import { molarVolumeFromDensity, unitCellVolume } from "./volume-checks.js";
+import { missing } from "./witness-inputs.js";
+
+type WitnessCheck = (record: SpeciesRecord, witness: Witness, collection: CollectionData) => number;
+
+const witnessChecks: Readonly<Record<WitnessCheckName, WitnessCheck>> = {
+  "closure-at-breaks": closureAtBreaks,
+  "entropy-at-298.15-K": entropyAtReference,
+  "tabulated-heat-capacity": tabulatedHeatCapacity,
+  "tabulated-entropy": tabulatedEntropy,
+  "tabulated-enthalpy-increment": tabulatedEnthalpyIncrement,
+  "statistical-mechanics-entropy": statisticalMechanicsEntropy,
+  "statistical-mechanics-heat-content": statisticalMechanicsHeatContent,
+  "enthalpy-at-298.15-K": enthalpyAtReference,
+  "reaction-enthalpy": reactionEnthalpy,
+  "dissociation-energy": dissociationEnergy,
+  "equilibrium-constant": equilibriumConstant,
+  "equilibrium-pressure": equilibriumPressure,
+  "critical-compressibility": criticalCompressibility,
+  "acentric-factor-from-boiling-point": acentricFactorFromBoilingPoint,
+  "unit-cell-volume": unitCellVolume,
+  "molar-volume-from-density": molarVolumeFromDensity,
+};
+
+/** A witness with its deviation computed anew. */
+export interface RecomputedWitness {
+  readonly witness: Witness;
+  /** The deviation that the named check computes now, in the check's own unit. */
+  readonly computed: number;
+  /** Whether it lies within the witness's tolerance. */
+  readonly confirms: boolean;
+}
+
+/**
+ * The deviation that the named check of a witness computes, in the check's own unit: J/mol, J/mol/K, or a plain number
+ * for closures, logarithms, factors and relative deviations.
+ *
+ * @param record - whose figures are checked
+ * @param witness - one of the record's, or another with the figures its check compares with
+ * @param collection - where the other species of a reaction are found
+ * @throws GibbsLedgerError "checks/no-inputs" where a figure is missing; "species/outside-range"
+ * @example
+ * import { N2_g, referenceData } from "gibbs-ledger/data";
+ * const [closure] = N2_g.witnesses;
+ * closure.check; // => "closure-at-breaks"
+ * Math.abs(computeWitness(N2_g, closure, referenceData)) < 1e-7; // => true
+ */
+export function computeWitness(record: SpeciesRecord, witness: Witness, collection: CollectionData): number {
+  const check = Object.hasOwn(witnessChecks, witness.check) ? witnessChecks[witness.check] : undefined;
+  if (check === undefined) return missing(record, witness.check, `a check of a known name, not "${witness.check}"`);
+  return check(record, witness, collection);
+}
+
+/**
+ * Computes every witness of a record anew.
+ *
+ * @param record - whose figures are checked
+ * @param collection - where the other species of its reactions are found
+ * @throws GibbsLedgerError "checks/no-inputs" where a figure is missing; "species/outside-range"
+ * @example
+ * import { H2O_g, referenceData } from "gibbs-ledger/data";
+ * recomputeWitnesses(H2O_g, referenceData).every(({ confirms }) => confirms); // => true
+ */
+export function recomputeWitnesses(record: SpeciesRecord, collection: CollectionData): RecomputedWitness[] {
+  return record.witnesses.map((witness) => {
+    const computed = computeWitness(record, witness, collection);
+    return { witness, computed, confirms: Math.abs(computed) <= witness.tolerance };
+  });
+}
