@@ -1,0 +1,1 @@
+export { type ArrayFunction, type CompiledReaction, type CompileOptions, compileReaction } from "./compile-reaction.js";

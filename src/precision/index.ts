@@ -1,0 +1,6 @@
+export {
+  type DigitsConditions,
+  evaluateToDigits,
+  type PreciseReactionProperties,
+  type PreciseValue,
+} from "./evaluate-to-digits.js";

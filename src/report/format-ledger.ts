@@ -1,0 +1,141 @@
+import type { Source } from "../references/source.js";
+import type { Ledger, LedgerEntry, LedgerGroup, LedgerSum } from "../reaction/ledger.js";
+import { caution } from "./caution.js";
+import { layOut, row, rule, type TextColumn } from "./columns.js";
+import { fitted, fixed, wrap } from "./text.js";
+
+const entryWidth = 21;
+const energyWidth = 9;
+const uncertaintyWidth = 7;
+
+const columns: readonly TextColumn[] = [
+  { heading: "entry", width: entryWidth, align: "left" },
+  { heading: "species", width: 14, align: "left" },
+  { heading: "nu", width: 4, align: "right" },
+  { heading: "kJ/mol", width: energyWidth, align: "right" },
+  { heading: "u", width: uncertaintyWidth, align: "right" },
+  { heading: "source", width: 20, align: "left" },
+];
+
+const groups: readonly LedgerGroup[] = ["formation", "temperature", "conditions"];
+
+/**
+ * A ledger as a text table of 80 columns: entry, species, stoichiometric number, kJ/mol, standard uncertainty in
+ * kJ/mol, source; three subtotals, the total, grades, notes and the caution.
+ *
+ * An unknown uncertainty is blank, and a sum over one prints `>=`. Two sources stand where the uncertainty comes from
+ * another source than the value.
+ *
+ * @param account - what {@link ledger} returned
+ * @returns lines joined by line feeds, each at most 80 characters long
+ * @example
+ * import { referenceData } from "gibbs-ledger/data";
+ * const boudouard = reaction("C(cr,graphite) + CO2(g) = 2 CO(g)", referenceData);
+ * const account = ledger(boudouard, {
+ *   temperature: quantity(1000, "K"),
+ *   pressure: quantity(1, "bar"),
+ *   gas: { moleFractions: { "CO2(g)": 0.5, "CO(g)": 0.5 } },
+ * });
+ * const text = formatLedger(account);
+ * text.split("\n")[0]; // => "Gibbs energy of reaction, per mole of reaction as written"
+ */
+export function formatLedger(account: Ledger): string {
+  const body = groups.flatMap((group) => [
+    ...account.entries.filter((entry) => entry.group === group).map(entryCells),
+    sumCells(group, account.subtotals[group]),
+  ]);
+  const [heading, line, ...rows] = layOut(columns, body);
+  const total = { value: account.total, uncertaintyIsLowerBound: account.uncertaintyIsLowerBound };
+  return [
+    "Gibbs energy of reaction, per mole of reaction as written",
+    ...wrap(account.equation, undefined, "  "),
+    ...wrap(conditionsLine(account)),
+    "",
+    heading!,
+    line!,
+    ...rows.flatMap((text, index) => (isSum(body[index]!) ? [text, rule(columns)] : [text])),
+    row(columns, sumCells("total", total)),
+    "",
+    ...wrap(`ln Q = ${fixed(account.lnReactionQuotient, 5)}; standard states: ${statesLine(account)}`),
+    ...wrap(`grades of the data: ${gradesLine(account)}`),
+    ...(account.outsideRange.length === 0 ? [] : wrap(`outside their range: ${account.outsideRange.join(", ")}`)),
+    ...[...longNotes(account), ...account.notes].flatMap((note) => wrap(`note: ${note}`, undefined, "  ")),
+    "",
+    ...wrap(caution),
+  ].join("\n");
+}
+
+function conditionsLine({ temperature, pressure, equationOfState }: Ledger): string {
+  const bar = Number((pressure.value / 1e5).toPrecision(7));
+  const gas = equationOfState === undefined ? "" : `, gas: ${equationOfState}`;
+  return `T = ${Number(temperature.value.toPrecision(7))} K, p = ${bar} bar${gas}`;
+}
+
+function entryCells({ entry, label, coefficient, value, source, secondSource, note }: LedgerEntry): string[] {
+  const sources = [source, secondSource].filter((item) => item !== undefined).map(sourceText);
+  return [
+    withNote({ entry, note }),
+    label,
+    coefficientText(coefficient),
+    energyText(value.value),
+    value.standardUncertainty === undefined ? "" : uncertaintyText(value.standardUncertainty),
+    sources.join(", "),
+  ];
+}
+
+/** What does not fit into the column stands below the table. */
+function withNote({ entry, note }: { entry: string; note: string | undefined }): string {
+  const text = `${entry} ${note ?? ""}`.trimEnd();
+  return text.length <= entryWidth ? text : entry;
+}
+
+function longNotes(account: Ledger): string[] {
+  return account.entries
+    .filter(({ entry, note }) => note !== undefined && withNote({ entry, note }) === entry)
+    .map(({ entry, label, note }) => `${label}: ${entry} ${note}`);
+}
+
+/** Below 1 two decimals fit without the zero before the point; the equation above the table is exact. */
+function coefficientText(coefficient: number): string {
+  const text = String(Number(coefficient.toPrecision(4)));
+  return text.length <= 4 || Math.abs(coefficient) >= 0.995 ? text : coefficient.toFixed(2).replace("0.", ".");
+}
+
+function sumCells(name: string, { value, uncertaintyIsLowerBound }: LedgerSum): string[] {
+  const prefix = uncertaintyIsLowerBound ? ">=" : "";
+  return [name, sumMark, "", energyText(value.value), uncertaintyText(value.standardUncertainty ?? 0, prefix)];
+}
+
+function energyText(energy: number): string {
+  return fitted(energy / 1000, 3, energyWidth);
+}
+
+function uncertaintyText(energy: number, prefix: string = ""): string {
+  return fitted(energy / 1000, 3, uncertaintyWidth, prefix);
+}
+
+const sumMark = "sum";
+
+function isSum(cells: readonly string[]): boolean {
+  return cells[1] === sumMark;
+}
+
+function sourceText(source: Source): string {
+  return typeof source === "string" ? source : source.text;
+}
+
+function statesLine({ standardStates }: Ledger): string {
+  const states = new Set(Object.values(standardStates));
+  return [...states].join(", ");
+}
+
+/** An element's enthalpy of formation is zero by definition and has no grade. */
+function gradesLine({ grades }: Ledger): string {
+  return Object.entries(grades)
+    .map(([label, { caloric, formation }]) => {
+      const named = { caloric, formation };
+      const parts = Object.entries(named).flatMap(([group, grade]) => (grade === undefined ? [] : `${group} ${grade}`));
+      return `${label} ${parts.length === 0 ? "none" : parts.join(", ")}`;
+    })
+    .join("; ");
+}

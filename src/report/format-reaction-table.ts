@@ -1,0 +1,129 @@
+import { gasConstantJPerMolK } from "../constants/constants.js";
+import { describeReceived, type Fault } from "../errors/fault.js";
+import { failIfAny } from "../errors/gibbs-ledger-error.js";
+import { checkArray, checkObject } from "../errors/input.js";
+import type { RangePolicy } from "../heat-capacity/range-policy.js";
+import { exactSum } from "../numeric/compensated.js";
+import { figureStandardUncertainty } from "../quantity/figure-value.js";
+import { temperatureInKelvin } from "../quantity/guards.js";
+import type { Temperature } from "../quantity/quantity.js";
+import { houseReaction, type Reaction } from "../reaction/reaction.js";
+import { standardReactionProperties } from "../reaction/standard-reaction.js";
+import { caution } from "./caution.js";
+import { layOut, type TextColumn } from "./columns.js";
+import { fitted, wrap } from "./text.js";
+
+/** Which temperatures a reaction table shows. */
+export interface ReactionTableOptions {
+  /** At least one, at most 10,000; shown in kelvin. */
+  readonly temperatures: readonly Temperature[];
+  /** `"refuse"` when absent. */
+  readonly outsideRange?: RangePolicy;
+}
+
+const columns: readonly TextColumn[] = [
+  { heading: "T", width: 9, align: "right" },
+  { heading: "log10 K", width: 11, align: "right" },
+  { heading: "u", width: 8, align: "right" },
+  { heading: "dG", width: 11, align: "right" },
+  { heading: "dH", width: 11, align: "right" },
+  { heading: "-T dS", width: 11, align: "right" },
+  { heading: "dCp", width: 9, align: "right" },
+];
+
+const uncertaintyPlace = 2;
+const units = ["K", "1", "1", "kJ/mol", "kJ/mol", "kJ/mol", "J/mol/K"];
+
+/**
+ * A table of a reaction over temperature as text of 80 columns: T, log10 K with its standard uncertainty as far as the
+ * data publish one, and the standard Gibbs energy with its parts, per mole of reaction as written.
+ *
+ * @param reaction - what {@link reaction} returned
+ * @param options - the temperatures
+ * @returns lines joined by line feeds, each at most 80 characters long
+ * @throws GibbsLedgerError "report/no-rows", and as {@link standardReactionProperties}
+ * @example
+ * import { referenceData } from "gibbs-ledger/data";
+ * const shift = reaction("CO(g) + H2O(g) = CO2(g) + H2(g)", referenceData);
+ * const text = formatReactionTable(shift, { temperatures: [quantity(500, "K"), quantity(1000, "K")] });
+ * text.split("\n").length > 5; // => true
+ */
+export function formatReactionTable(reaction: Reaction, options: ReactionTableOptions): string {
+  const house = houseReaction(reaction);
+  const faults: Fault[] = [];
+  const members = checkObject(options, ["options"], faults, { required: ["temperatures"], optional: ["outsideRange"] });
+  failIfAny(faults);
+  const temperatures = checkArray(members?.temperatures, ["temperatures"], faults) ?? [];
+  if (faults.length === 0 && temperatures.length === 0) {
+    faults.push({
+      code: "report/no-rows",
+      path: ["temperatures"],
+      message: `a table needs at least one temperature, got ${describeReceived(temperatures)}`,
+      expected: "at least one temperature",
+    });
+  }
+  failIfAny(faults);
+  const outside = new Set<string>();
+  let lowerBound = false;
+  const rows = options.temperatures.map((temperature, index) => {
+    const temperatureK = temperatureInKelvin(temperature, "temperatures", index);
+    const properties = standardReactionProperties(house, {
+      temperature,
+      ...(options.outsideRange === undefined ? {} : { outsideRange: options.outsideRange }),
+    });
+    for (const label of properties.outsideRange) outside.add(label);
+    const uncertainty = uncertaintyOfLog10K(house, temperatureK);
+    lowerBound ||= uncertainty.isLowerBound;
+    const cells = [
+      [temperatureK, 2],
+      [properties.log10K, 4],
+      [uncertainty.value, 4],
+      [properties.gibbsEnergy.value / 1000, 3],
+      [properties.enthalpy.value / 1000, 3],
+      [(-temperatureK * properties.entropy.value) / 1000, 3],
+      [properties.heatCapacity?.value, 3],
+    ] as const;
+    return cells.map(([value, decimals], place) => {
+      const prefix = place === uncertaintyPlace && uncertainty.isLowerBound ? ">=" : "";
+      return value === undefined ? "" : fitted(value, decimals, columns[place]!.width, prefix);
+    });
+  });
+  const [heading, line, unitRow, ...body] = layOut(columns, [units, ...rows]);
+  return [
+    "Standard reaction properties, per mole of reaction as written, at 1 bar",
+    ...wrap(house.equation, undefined, "  "),
+    "",
+    heading!,
+    unitRow!,
+    line!,
+    ...body,
+    "",
+    ...(lowerBound ? ["u: from enthalpies of formation and entropies; >= where a figure has no known u"] : []),
+    ...(outside.size === 0 ? [] : wrap(`outside their range: ${[...outside].join(", ")}`)),
+    ...wrap(caution),
+  ].join("\n");
+}
+
+/**
+ * From the published uncertainties of enthalpies of formation and entropies at 298.15 K, independent of each other;
+ * that of the heat capacity is not published with the fits.
+ */
+function uncertaintyOfLog10K(
+  { terms }: Reaction,
+  temperatureK: number,
+): { readonly value: number; readonly isLowerBound: boolean } {
+  const parts = terms.flatMap(({ coefficient, species: { formationEnthalpy, standardEntropy } }) => {
+    const enthalpy = figureStandardUncertainty(formationEnthalpy);
+    const entropy = figureStandardUncertainty(standardEntropy);
+    return [
+      enthalpy === undefined ? undefined : coefficient * enthalpy,
+      entropy === undefined ? undefined : coefficient * temperatureK * entropy,
+    ];
+  });
+  const known = parts.filter((part) => part !== undefined);
+  const inEnergy = Math.sqrt(exactSum(known.map((part) => part * part)));
+  return {
+    value: inEnergy / (gasConstantJPerMolK * temperatureK * Math.LN10),
+    isLowerBound: known.length < parts.length,
+  };
+}
