@@ -101,7 +101,7 @@ function rounded(partials: readonly number[]): number {
     if (low !== 0) break;
   }
   // Exactly half a unit was left and more lies below in the same direction: the tie was none.
-  if (index > 0 && (low < 0) === partials[index - 1]! < 0) {
+  if (index > 0 && low < 0 === partials[index - 1]! < 0) {
     const twice = low * 2;
     const next = high + twice;
     if (twice === next - high) high = next;

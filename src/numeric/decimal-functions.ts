@@ -112,6 +112,7 @@ function roundedDecimal(mantissa: bigint, exponent: number, digits: number): Exa
   if (surplus <= 0) return { mantissa, exponent };
   const unit = powerOfTen(surplus);
   const rounded = (magnitude + unit / 2n) / unit;
+  if (rounded === powerOfTen(digits)) return { mantissa: negative ? -1n : 1n, exponent: exponent + surplus + digits };
   return { mantissa: negative ? -rounded : rounded, exponent: exponent + surplus };
 }
 

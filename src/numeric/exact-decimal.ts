@@ -35,7 +35,8 @@ export function powerOfTen(exponent: number): bigint {
 
 /**
  * The decimal that a number or a numeral stands for. A double is read as the shortest decimal that names it
- * (0.1 is one tenth), which is what a published coefficient means; see {@link exactDecimalOfDouble} for its binary value.
+ * (0.1 is one tenth), which is what a published coefficient means; see {@link exactDecimalOfDouble} for its binary
+ * value.
  *
  * @param value - a finite double, or a numeral such as "-1.50e3" of at most 10,000 characters and a four-digit exponent
  * @throws GibbsLedgerError "numeric/not-a-decimal"
@@ -128,9 +129,7 @@ export function decimalToNumber(a: ExactDecimal): number {
   if (exponent >= -22 && exponent <= 22 && Number.isSafeInteger(approximate)) {
     return exponent < 0 ? approximate / exactPowersOfTen[-exponent]! : approximate * exactPowersOfTen[exponent]!;
   }
-  return exponent < 0
-    ? roundRatio(mantissa, powerOfTen(-exponent))
-    : roundRatio(mantissa * powerOfTen(exponent), 1n);
+  return exponent < 0 ? roundRatio(mantissa, powerOfTen(-exponent)) : roundRatio(mantissa * powerOfTen(exponent), 1n);
 }
 
 /** The double nearest to a / divisor, ties to even; the divisor is not zero. */
@@ -189,7 +188,10 @@ export function roundRatio(numerator: bigint, denominator: bigint): number {
   return negative && magnitude !== 0 ? -magnitude : magnitude;
 }
 
-/** The decimal as a numeral, without trailing zeros: plain where short ("-0.0015"), else with an exponent ("1.5e-30"). */
+/**
+ * The decimal as a numeral, without trailing zeros: plain where short ("-0.0015"), else with an exponent
+ * ("1.5e-30").
+ */
 export function decimalToString(a: ExactDecimal): string {
   if (a.mantissa === 0n) return "0";
   const negative = a.mantissa < 0n;

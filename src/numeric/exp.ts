@@ -10,8 +10,8 @@ const roundingShift = 6755399441055744;
  *
  * x = (128 k + i) ln 2 / 128 + r, with 2^(i/128) from a table in two parts; the rest is a short series.
  *
- * @remarks Accuracy: below 0.51 ulp (0.504 at worst in 14,000 random and constructed cases against 45 digits); a subnormal
- * result, which is rounded twice, below 0.76 ulp (0.740 in 1,500).
+ * @remarks Accuracy: below 0.51 ulp (0.504 at worst in 14,000 random and constructed cases against 45 digits); a
+ * subnormal result, which is rounded twice, below 0.76 ulp (0.740 in 1,500).
  * @see P. T. P. Tang, ACM Trans. Math. Softw. 15, 144 (1989)
  */
 export const exp: (x: number) => number = /* @__PURE__ */ createExp();

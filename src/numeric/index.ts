@@ -26,8 +26,8 @@ export {
 export { exp } from "./exp.js";
 export { expm1 } from "./expm1.js";
 export { log } from "./log.js";
-export { log10 } from "./log10.js";
 export { log1p } from "./log1p.js";
+export { log10 } from "./log10.js";
 export { power } from "./power.js";
 export {
   addRationals,

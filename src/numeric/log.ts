@@ -7,7 +7,9 @@ import { ln2High, ln2Low, logarithmsHigh, logarithmsLow, offsets, reciprocals } 
  * x = 2^k c (1 + r), with ln c from a table of 128 rows and r computed without rounding; the rest is a short series.
  *
  * @param x - above zero; 0 gives -Infinity, a negative number NaN, as IEEE 754 has it (callers guard)
- * @remarks Accuracy: below 0.51 ulp over all doubles (0.502 at worst in 24,000 random and constructed cases against 45 digits).
+ * @remarks Accuracy: below 0.52 ulp over all doubles (0.515 at worst, near 1.0039, in 48,000 random and constructed
+ * cases against 45 digits).
+ * Speed: some three quarters of the time of V8's own function.
  * @see P. T. P. Tang, ACM Trans. Math. Softw. 16, 378 (1990)
  */
 export const log: (x: number) => number = /* @__PURE__ */ createLog();

@@ -10,14 +10,16 @@ const view: DataView = /* @__PURE__ */ new DataView(buffer);
 /**
  * A root of a function between two points where its signs are opposite, to the last bits and without derivatives.
  *
- * The method of Chandrupatla, inverse quadratic interpolation where it is safe and halving elsewhere; after 60 steps the
+ * The method of Chandrupatla, inverse quadratic interpolation where it is safe and halving elsewhere; after 60 steps
+ * the
  * doubles that are left are bisected by their order, so that no function takes more than 130 evaluations.
  *
  * @param f - a continuous function; one that jumps across zero gives the place of the jump
  * @param lower - finite
  * @param upper - finite; the ends may stand in either order
  * @returns of the last two neighbouring doubles the one where |f| is smaller, or a point where f is exactly 0
- * @throws GibbsLedgerError "input/not-finite" where an end is not finite; "roots/not-bracketed" where f has the same sign
+ * @throws GibbsLedgerError "input/not-finite" where an end is not finite; "roots/not-bracketed" where f has the same
+ * sign
  * at both ends, or is not a number somewhere
  * @see T. R. Chandrupatla, Adv. Eng. Softw. 28, 145 (1997)
  */
@@ -63,8 +65,7 @@ function nextFraction(a: number, b: number, c: number, atA: number, atB: number,
   const xi = (a - b) / (c - b);
   const phi = (atA - atB) / (atC - atB);
   if (!(phi * phi < xi && (1 - phi) * (1 - phi) < 1 - xi)) return 0.5;
-  const t =
-    (atA / (atB - atA)) * (atC / (atB - atC)) + ((c - a) / (b - a)) * (atA / (atC - atA)) * (atB / (atC - atB));
+  const t = (atA / (atB - atA)) * (atC / (atB - atC)) + ((c - a) / (b - a)) * (atA / (atC - atA)) * (atB / (atC - atB));
   // At least two units in the last place from either end, or the bracket would close from one side only.
   const best = Math.abs(atA) < Math.abs(atB) ? a : b;
   const least = Math.min(0.5, (Math.abs(best) * 4.440892098500626e-16) / Math.abs(b - a));

@@ -100,12 +100,25 @@ describe("exactDot", () => {
     for (let round = 0; round < 2000; round += 1) {
       const pairs = nearCancelling(random).map((value) => [value, Math.floor(random() * 19 - 9) / 2] as const);
       // The last product nearly cancels the rest.
-      const rest = exactDot(pairs.map(([a]) => a), pairs.map(([, b]) => b));
+      const rest = exactDot(
+        pairs.map(([a]) => a),
+        pairs.map(([, b]) => b),
+      );
       const all = [...pairs, [-rest / 3, 3] as const];
       const expected = nearest(all.reduce((sum, [a, b]) => sum + exactProduct(a, b), 0n));
       const other = shuffled(all, random);
-      expect(exactDot(all.map(([a]) => a), all.map(([, b]) => b))).toBe(expected);
-      expect(exactDot(other.map(([a]) => a), other.map(([, b]) => b))).toBe(expected);
+      expect(
+        exactDot(
+          all.map(([a]) => a),
+          all.map(([, b]) => b),
+        ),
+      ).toBe(expected);
+      expect(
+        exactDot(
+          other.map(([a]) => a),
+          other.map(([, b]) => b),
+        ),
+      ).toBe(expected);
     }
   });
 

@@ -13,7 +13,13 @@ function other(a: ExactDecimal): Decimal {
 
 /** The distance from the reference in units of the last of so many significant digits. */
 function unitsOff(value: ExactDecimal, reference: Decimal, digits: number): number {
-  const unit = new W(10).pow(reference.abs().log(10).floor().plus(1 - digits));
+  const unit = new W(10).pow(
+    reference
+      .abs()
+      .log(10)
+      .floor()
+      .plus(1 - digits),
+  );
   return other(value).minus(reference).abs().div(unit).toNumber();
 }
 
@@ -41,7 +47,7 @@ function codeOf(action: () => unknown): string | undefined {
 
 describe("lnDecimal", () => {
   test.each([1, 5, 17, 40, 60])("has %d digits", (digits) => {
-    for (const x of sample(120, digits)) {
+    for (const x of sample(60, digits)) {
       const result = lnDecimal(x, digits);
       expect(unitsOff(result, other(x).ln(), digits)).toBeLessThan(0.51);
       expect(result.mantissa.toString().replace("-", "").length).toBeLessThanOrEqual(digits);
@@ -57,8 +63,20 @@ describe("lnDecimal", () => {
   });
 
   test("keeps its digits next to powers of two and far from 1", () => {
-    const texts = ["0.5", "2", "4", "1.9999999999999999999", "2.0000000000000001", "0.6666666", "0.6666667", "1.3333333",
-      "1.3333334", "1e-9999", "1e9999", "9.999e4321"];
+    const texts = [
+      "0.5",
+      "2",
+      "4",
+      "1.9999999999999999999",
+      "2.0000000000000001",
+      "0.6666666",
+      "0.6666667",
+      "1.3333333",
+      "1.3333334",
+      "1e-9999",
+      "1e9999",
+      "9.999e4321",
+    ];
     for (const text of texts) expect(unitsOff(lnDecimal(decimalOf(text), 45), new W(text).ln(), 45)).toBeLessThan(0.51);
   });
 

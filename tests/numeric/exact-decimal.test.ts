@@ -23,7 +23,10 @@ import { exactDecimal, neighbour, parts, randomPositive, seeded } from "./ulp.js
 const W = Decimal.clone({ precision: 1200, toExpNeg: -9e15, toExpPos: 9e15 });
 
 const doubles = fc.double({ noNaN: true, noDefaultInfinity: true });
-const decimals = fc.record({ mantissa: fc.bigInt({ min: -(10n ** 25n), max: 10n ** 25n }), exponent: fc.integer({ min: -40, max: 40 }) });
+const decimals = fc.record({
+  mantissa: fc.bigInt({ min: -(10n ** 25n), max: 10n ** 25n }),
+  exponent: fc.integer({ min: -40, max: 40 }),
+});
 
 function other(a: ExactDecimal): Decimal {
   return new W(`${a.mantissa}e${a.exponent}`);
@@ -76,12 +79,24 @@ describe("decimalOf", () => {
     },
   );
 
-  test.each(["", " 1", "1 ", "1e", "1e12345", ".", "+", "0x10", "1,5", "1_000", "NaN", "Infinity", "١", "1".repeat(10_001)])(
-    "refuses %j",
-    (text) => {
-      expect(codeOf(() => decimalOf(text))).toBe("numeric/not-a-decimal");
-    },
-  );
+  test.each([
+    "",
+    " 1",
+    "1 ",
+    "1e",
+    "1e12345",
+    ".",
+    "+",
+    "0x10",
+    "1,5",
+    "1_000",
+    "NaN",
+    "Infinity",
+    "١",
+    "1".repeat(10_001),
+  ])("refuses %j", (text) => {
+    expect(codeOf(() => decimalOf(text))).toBe("numeric/not-a-decimal");
+  });
 
   test.each([Number.NaN, Number.POSITIVE_INFINITY, Number.NEGATIVE_INFINITY])("refuses %d", (value) => {
     expect(codeOf(() => decimalOf(value))).toBe("numeric/not-a-decimal");
@@ -99,7 +114,9 @@ test("exactDecimalOfDouble is the binary value of the double", () => {
     // value 2^-exponent = significand, in whole numbers
     const top = value.exponent > 0 ? value.mantissa * 10n ** BigInt(value.exponent) : value.mantissa;
     const bottom = value.exponent < 0 ? 10n ** BigInt(-value.exponent) : 1n;
-    expect(exponent < 0 ? top << BigInt(-exponent) : top).toBe(significand * (exponent > 0 ? bottom << BigInt(exponent) : bottom));
+    expect(exponent < 0 ? top << BigInt(-exponent) : top).toBe(
+      significand * (exponent > 0 ? bottom << BigInt(exponent) : bottom),
+    );
     expect(decimalToNumber(value)).toBe(x);
   }
 });
@@ -180,9 +197,13 @@ describe("roundRatio", () => {
 
 test("decimals become the nearest double, as the engine's own reader of numerals does", () => {
   fc.assert(
-    fc.property(fc.bigInt({ min: -(10n ** 20n) + 1n, max: 10n ** 20n - 1n }), fc.integer({ min: -345, max: 310 }), (m, e) => {
-      expect(decimalToNumber({ mantissa: m, exponent: e })).toBe(Number(`${m}e${e}`) + 0);
-    }),
+    fc.property(
+      fc.bigInt({ min: -(10n ** 20n) + 1n, max: 10n ** 20n - 1n }),
+      fc.integer({ min: -345, max: 310 }),
+      (m, e) => {
+        expect(decimalToNumber({ mantissa: m, exponent: e })).toBe(Number(`${m}e${e}`) + 0);
+      },
+    ),
     { seed: 20261201, numRuns: 2000 },
   );
   expect(decimalToNumber({ mantissa: -1n, exponent: -400 })).toBe(0);

@@ -5,11 +5,14 @@ import { neighbour } from "./ulp.js";
 
 describe("exp against 45 digits", () => {
   test.each([
-    ["the whole range of normal results", draw(1000, 41, (random) => (random() * 2 - 1) * 708)],
-    ["the short way", draw(500, 42, (random) => (random() * 2 - 1) * 45)],
-    ["near 0", nearZero(700, 43)],
+    ["the whole range of normal results", draw(700, 41, (random) => (random() * 2 - 1) * 708)],
+    ["the short way", draw(300, 42, (random) => (random() * 2 - 1) * 45)],
+    ["near 0", nearZero(500, 43)],
     ["borders of the table's rows", exponentialBorders()],
-    ["the ends of the short way", [44, -44, neighbour(44, -1), neighbour(-44, 1), 709.782712893384, -708.3964185322641]],
+    [
+      "the ends of the short way",
+      [44, -44, neighbour(44, -1), neighbour(-44, 1), 709.782712893384, -708.3964185322641],
+    ],
     // Worst seen in longer runs.
     ["stored worst cases", [134.79289939256765, -0.014800731000748697]],
   ])("is within 0.51 ulp: %s", (_, sample) => {
@@ -17,7 +20,7 @@ describe("exp against 45 digits", () => {
   });
 
   test("is within 0.76 ulp where the result is subnormal", () => {
-    const sample = draw(500, 44, (random) => -708.4 - 36.7 * random());
+    const sample = draw(300, 44, (random) => -708.4 - 36.7 * random());
     expect(worstError(exp, (x) => x.exp(), sample).ulp).toBeLessThan(0.76);
   });
 });

@@ -2,7 +2,8 @@
 //   node tests/numeric/generate-log-table.mjs           rewrites the file
 //   node tests/numeric/generate-log-table.mjs --print   prints it
 //
-// A mantissa z is nearest to one of the 128 centres m = 1 + i/128, with |z - m| <= 2^-8. c is near m, and 1/c is a whole
+// A mantissa z is nearest to one of the 128 centres m = 1 + i/128, with |z - m| <= 2^-8. c is near m, and 1/c is a
+// whole
 // multiple of 1/512, chosen so that r = (z - m) / c + (m / c - 1) = z / c - 1 is small and computed without rounding.
 import { writeFileSync } from "node:fs";
 import { pathToFileURL } from "node:url";

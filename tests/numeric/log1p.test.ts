@@ -7,10 +7,13 @@ const limit = 0.00390625;
 const wide = D.clone({ precision: 80 });
 
 test.each([
-  ["near 0", nearZero(1500, 31).filter((x) => x > -1)],
-  ["above 0", anyPositive(700, 32).filter((x) => x > 1e-20)],
-  ["near -1", draw(500, 33, (random) => 2 ** (-53 * random()) - 1).filter((x) => x > -1 && x !== 0)],
-  ["around the end of the series", draw(500, 34, (random) => (random() < 0.5 ? -1 : 1) * limit * (0.9 + 0.2 * random()))],
+  ["near 0", nearZero(1000, 31).filter((x) => x > -1)],
+  ["above 0", anyPositive(500, 32).filter((x) => x > 1e-20)],
+  ["near -1", draw(400, 33, (random) => 2 ** (-53 * random()) - 1).filter((x) => x > -1 && x !== 0)],
+  [
+    "around the end of the series",
+    draw(300, 34, (random) => (random() < 0.5 ? -1 : 1) * limit * (0.9 + 0.2 * random())),
+  ],
   ["the greatest doubles", [1e18, 1.0000000000000001e18, 1e19, Number.MAX_VALUE]],
 ])("log1p is within 0.51 ulp of 45 digits or more: %s", (_, sample) => {
   expect(worstError(log1p, (x) => new wide(x).plus(1).ln(), sample).ulp).toBeLessThan(0.51);

@@ -37,7 +37,10 @@ const cases: [string, (x: number) => number, number, number, number][] = [
 
 describe("findRoot", () => {
   test.each(cases)("%s, ends in either order, in at most 130 evaluations", (_, f, lower, upper, root) => {
-    for (const [a, b] of [[lower, upper], [upper, lower]] as const) {
+    for (const [a, b] of [
+      [lower, upper],
+      [upper, lower],
+    ] as const) {
       const { f: watched, count } = counted(f);
       const x = findRoot(watched, a, b);
       expect(Math.abs(x - root)).toBeLessThanOrEqual(4 * Number.EPSILON * Math.abs(root));
@@ -55,7 +58,9 @@ describe("findRoot", () => {
       const root = 300 + 3000 * random();
       const curvature = random();
       // Like a reaction's Gibbs energy over temperature, in invented numbers.
-      const { f, count } = counted((x) => (x - root) * (1 + (curvature * x) / 1000) + 1e-3 * (x - root) * Math.log(x / 298));
+      const { f, count } = counted(
+        (x) => (x - root) * (1 + (curvature * x) / 1000) + 1e-3 * (x - root) * Math.log(x / 298),
+      );
       const x = findRoot(f, 200, 6000);
       expect(Math.abs(x - root)).toBeLessThanOrEqual(2 * Number.EPSILON * root);
       total += count();
@@ -69,7 +74,12 @@ describe("findRoot", () => {
     expect(findRoot((x) => x, -0, 1)).toBe(0);
     expect(findRoot((x) => x, -1, 1)).toBe(0);
     expect(findRoot((x) => (x >= 0 ? 1 : -1), -1, 1)).toBeCloseTo(0, 300);
-    expect(Object.is(findRoot((x) => (x >= 0 ? 1 : -2), -1, 1), -0)).toBe(false);
+    expect(
+      Object.is(
+        findRoot((x) => (x >= 0 ? 1 : -2), -1, 1),
+        -0,
+      ),
+    ).toBe(false);
   });
 
   test("refuses ends of the same sign, ends that are not finite, and functions that are not numbers", () => {

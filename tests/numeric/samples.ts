@@ -40,7 +40,10 @@ export function nearZero(count: number, seed: number): number[] {
   return draw(count, seed, (random) => (random() * 2 - 1) * 2 ** (4 - random() * 60)).filter((x) => x !== 0);
 }
 
-/** The borders between the rows of the table of logarithms and the rows' centres, and their neighbours; 1 is left out. */
+/**
+ * The borders between the rows of the table of logarithms and the rows' centres, and their neighbours; 1 is left
+ * out.
+ */
 export function logarithmBorders(): number[] {
   const borders: number[] = [];
   for (let index = 256; index < 512; index += 1) {
@@ -63,7 +66,7 @@ export function powersOfTwo(): number[] {
 /** Where the exponential function changes from one row of its table to the next. */
 export function exponentialBorders(): number[] {
   const borders: number[] = [];
-  for (let index = -300; index < 300; index += 1) {
+  for (let index = -301; index < 300; index += 2) {
     for (const step of [-3, 3]) borders.push(neighbour(((index + 0.5) * Math.LN2) / 128, step));
   }
   return borders;

@@ -4,15 +4,24 @@ import { Decimal } from "decimal.js";
 export const D: typeof Decimal = Decimal.clone({ precision: 45, toExpNeg: -9e15, toExpPos: 9e15 });
 
 const bits = new DataView(new ArrayBuffer(8));
-const powers = new Map<number, Decimal>();
+const powersOfFive = new Map<number, bigint>();
+const units = new Map<number, Decimal>();
 
-function powerOfTwoDecimal(exponent: number): Decimal {
-  let power = powers.get(exponent);
+function fiveTo(exponent: number): bigint {
+  let power = powersOfFive.get(exponent);
   if (power === undefined) {
-    const magnitude = 2n ** BigInt(Math.abs(exponent));
-    // Exact: 2^-n = 5^n / 10^n.
-    power = exponent < 0 ? new D(`${5n ** BigInt(-exponent)}e${exponent}`) : new D(magnitude.toString());
-    powers.set(exponent, power);
+    power = 5n ** BigInt(exponent);
+    powersOfFive.set(exponent, power);
+  }
+  return power;
+}
+
+/** 2^exponent to 45 digits. */
+function unit(exponent: number): Decimal {
+  let power = units.get(exponent);
+  if (power === undefined) {
+    power = new D(2).pow(exponent);
+    units.set(exponent, power);
   }
   return power;
 }
@@ -27,11 +36,17 @@ export function parts(value: number): { significand: bigint; exponent: number } 
   return { significand: word >> 63n === 1n ? -magnitude : magnitude, exponent: Math.max(field, 1) - 1075 };
 }
 
-/** The exact value of a double. The constructor alone would take its shortest decimal. */
+/**
+ * The exact value of a double, where it has more than 130 digits cut there (the constructor alone would take its
+ * shortest decimal). Doubles near 1 have at most 107 digits: their distance from 1 stays exact.
+ */
 export function exactDecimal(value: number): Decimal {
   const { significand, exponent } = parts(value);
-  const wide = D.clone({ precision: 1100 });
-  return new D(new wide(significand.toString()).times(powerOfTwoDecimal(exponent)).toString());
+  if (exponent >= 0) return new D((significand << BigInt(exponent)).toString());
+  // significand / 2^n = significand 5^n / 10^n
+  const digits = (significand * fiveTo(-exponent)).toString();
+  const surplus = Math.max(0, digits.length - 130);
+  return new D(`${digits.slice(0, digits.length - surplus)}e${exponent + surplus}`);
 }
 
 /** The distance of a double from a reference in units of the reference's last place. */
@@ -42,7 +57,7 @@ export function ulpError(computed: number, reference: Decimal): number {
   if (nearest > 0 && reference.abs().lt(exactDecimal(nearest)) && parts(nearest).significand === 2n ** 52n) {
     exponent = Math.max(exponent - 1, -1074);
   }
-  return exactDecimal(computed).minus(reference).abs().div(powerOfTwoDecimal(exponent)).toNumber();
+  return exactDecimal(computed).minus(reference).abs().div(unit(exponent)).toNumber();
 }
 
 /** The double next above (steps > 0) or below (steps < 0), counted in units of the last place. */
