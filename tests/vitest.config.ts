@@ -5,6 +5,9 @@ export default defineConfig({
   root: fileURLToPath(new URL("..", import.meta.url)),
   test: {
     include: ["tests/**/*.test.ts"],
+    exclude: ["tests/package/**"],
+    maxWorkers: "100%",
     testTimeout: 60_000,
+    hookTimeout: 120_000,
   },
 });
