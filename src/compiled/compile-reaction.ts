@@ -1,4 +1,3 @@
-import { gasConstantJPerMolK } from "../constants/constants.js";
 import { describeReceived, type Fault } from "../errors/fault.js";
 import { fail, failIfAny } from "../errors/gibbs-ledger-error.js";
 import { checkObject } from "../errors/input.js";
@@ -8,7 +7,8 @@ import type { SeriesPlan } from "../heat-capacity/merge.js";
 import type { RangePolicy } from "../heat-capacity/range-policy.js";
 import { log } from "../numeric/log.js";
 import type { Reaction } from "../reaction/reaction.js";
-import { reactionPlan, reactionPlans } from "../reaction/reaction-plan.js";
+import { reactionPlans } from "../reaction/reaction.js";
+import { reactionPlan } from "../reaction/reaction-plan.js";
 import { lnOfConstant } from "../reaction/standard-reaction.js";
 
 /** What is fixed when a reaction is compiled. */
@@ -63,7 +63,7 @@ export interface CompiledReaction {
  */
 export function compileReaction(reaction: Reaction, options: CompileOptions = {}): CompiledReaction {
   const faults: Fault[] = [];
-  checkObject(options, ["options"], faults, { required: [], optional: ["outsideRange"] });
+  checkObject(options, [], faults, { required: [], optional: ["outsideRange"] });
   failIfAny(faults);
   const plans = reactionPlans(reaction);
   const plan = reactionPlan(plans, options.outsideRange);

@@ -315,7 +315,7 @@ export const SO3_g: SpeciesRecord = {
         unitPressure: { value: 1, unit: "atm", source: "bodenstein1905", origin: "memory" },
       },
       reaction: { "SO2(g)": -1, "O2(g)": -0.5, "SO3(g)": 1 },
-      deviation: 0,
+      deviation: 0.03256,
       tolerance: 0.05,
       over: [800, 1000],
       source: "bodenstein1905",

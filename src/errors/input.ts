@@ -80,7 +80,12 @@ export function checkNumber(value: unknown, path: FaultPath, faults: Fault[]): n
 }
 
 /** Checks that a value is a text that is neither empty nor longer than a limit. */
-export function checkText(value: unknown, path: FaultPath, faults: Fault[], longest: number = 1000): string | undefined {
+export function checkText(
+  value: unknown,
+  path: FaultPath,
+  faults: Fault[],
+  longest: number = 1000,
+): string | undefined {
   if (typeof value !== "string" || value === "") {
     faults.push({
       code: "input/not-a-string",

@@ -26,9 +26,7 @@ function editDistance(a: string, b: string): number {
     const current = [row];
     for (let column = 1; column <= b.length; column += 1) {
       const change = a[row - 1] === b[column - 1] ? 0 : 1;
-      current.push(
-        Math.min(previous[column]! + 1, current[column - 1]! + 1, previous[column - 1]! + change),
-      );
+      current.push(Math.min(previous[column]! + 1, current[column - 1]! + 1, previous[column - 1]! + change));
     }
     previous = current;
   }

@@ -70,7 +70,7 @@ const sumTolerance = 1e-9;
  *   moleFractions: { "N2(g)": 0.4, "CH4(g)": 0.6 },
  *   species: [N2_g, CH4_g],
  * });
- * properties.compressibilityFactor; // => 0.87...
+ * properties.compressibilityFactor; // => 0.864...
  * properties.fugacities["N2(g)"]?.unit; // => "Pa"
  */
 export function gasMixtureProperties(

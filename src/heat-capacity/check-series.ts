@@ -34,7 +34,8 @@ export function checkSeries(
   if (members.decimalShifts !== undefined) checkShifts(members.decimalShifts, [...path, "decimalShifts"], faults);
   checkIntervals(members.intervals, [...path, "intervals"], faults);
   if (members.anchor !== undefined) checkAnchor(members.anchor, [...path, "anchor"], faults);
-  if (faults.length === before) checkForm(members as PublishedSeries, path, faults);
+  const isWhole = members.form !== undefined && members.intervals !== undefined;
+  if (isWhole && faults.length === before) checkForm(members as PublishedSeries, path, faults);
 }
 
 function checkGasConstant(value: unknown, path: FaultPath, faults: Fault[]): void {
@@ -111,7 +112,8 @@ function checkShifts(value: unknown, path: FaultPath, faults: Fault[]): void {
 function checkAnchor(value: unknown, path: FaultPath, faults: Fault[]): void {
   const anchor = checkObject(value, path, faults, { required: ["temperature", "enthalpy", "entropy"], optional: [] });
   if (anchor === undefined) return;
-  if (anchor.temperature !== undefined) checkFigure(anchor.temperature, "temperature", [...path, "temperature"], faults);
+  if (anchor.temperature !== undefined)
+    checkFigure(anchor.temperature, "temperature", [...path, "temperature"], faults);
   if (anchor.enthalpy !== undefined) checkFigure(anchor.enthalpy, "molarEnergy", [...path, "enthalpy"], faults);
   if (anchor.entropy !== undefined) checkFigure(anchor.entropy, "molarEntropy", [...path, "entropy"], faults);
 }

@@ -1,30 +1,28 @@
 import { type CompensatedPair, twoProduct, twoSum } from "../numeric/compensated.js";
 
 /**
- * The basis that every integral of a heat-capacity series is written in. The first thirteen functions have a place of
- * their own because the published forms use them; any other power of T, a multiple of 1/2, is an extra.
+ * The functions that every integral of a heat-capacity series is a linear combination of, and that have a place of
+ * their own because the published forms use them, with the power of T that each is; undefined for the two with a
+ * logarithm. Any other power of T, a multiple of 1/2, is an extra.
  */
 export const basis = [
-  "1",
-  "T",
-  "T^2",
-  "T^3",
-  "T^4",
-  "T^5",
-  "T^-1",
-  "T^-2",
-  "T^-3",
-  "ln T",
-  "T ln T",
-  "T^(1/2)",
-  "T^(-1/2)",
+  ["constant", 0],
+  ["linear", 1],
+  ["square", 2],
+  ["cube", 3],
+  ["fourth", 4],
+  ["fifth", 5],
+  ["inverse", -1],
+  ["inverseSquare", -2],
+  ["inverseCube", -3],
+  ["root", 0.5],
+  ["inverseRoot", -0.5],
+  ["logarithm", undefined],
+  ["linearLogarithm", undefined],
 ] as const;
 
-/** Places of the functions that are not whole powers. */
-export const logarithmPlace = 9;
-export const temperatureLogarithmPlace = 10;
-const rootPlace = 11;
-const reciprocalRootPlace = 12;
+/** Name of a function of the basis. */
+export type BasisName = (typeof basis)[number][0];
 
 /** A power of T that has no place of its own in the basis. */
 export interface ExtraPower {
@@ -32,58 +30,69 @@ export interface ExtraPower {
   readonly coefficient: number;
 }
 
-/** One function of temperature as a linear combination of the basis. */
-export interface Columns {
-  /** Coefficients in the order of {@link basis}. */
-  readonly fixed: Float64Array;
-  /** Whether a square root is needed. */
-  readonly hasRoots: boolean;
+/** One function of temperature as a linear combination of the basis: a coefficient by name, and extra powers. */
+export type Columns = Readonly<Record<BasisName, number>> & {
   readonly extras: readonly ExtraPower[];
+  /** Whether inverse cube, roots and extras are all absent, as in the forms that are most used. */
+  readonly isPlain: boolean;
+};
+
+/** Coefficients by name, all zero, to be filled. */
+export function emptyColumns(): Record<BasisName, number> {
+  return {
+    constant: 0,
+    linear: 0,
+    square: 0,
+    cube: 0,
+    fourth: 0,
+    fifth: 0,
+    inverse: 0,
+    inverseSquare: 0,
+    inverseCube: 0,
+    root: 0,
+    inverseRoot: 0,
+    logarithm: 0,
+    linearLogarithm: 0,
+  };
 }
 
-/** The place of T^exponent in the basis, or undefined where it is an extra. */
-export function placeOfPower(exponent: number): number | undefined {
-  if (Number.isInteger(exponent)) {
-    if (exponent >= 0 && exponent <= 5) return exponent;
-    if (exponent >= -3 && exponent <= -1) return 5 - exponent;
-    return undefined;
-  }
-  if (exponent === 0.5) return rootPlace;
-  return exponent === -0.5 ? reciprocalRootPlace : undefined;
+/** The function of the basis that is T^exponent, or undefined where that is an extra. */
+export function nameOfPower(exponent: number): BasisName | undefined {
+  return basis.find(([, power]) => power === exponent)?.[0];
 }
 
 /** Puts columns together; extras with coefficient zero are left out. */
-export function columns(fixed: Float64Array, extras: readonly ExtraPower[]): Columns {
-  return {
-    fixed,
-    hasRoots: fixed[rootPlace] !== 0 || fixed[reciprocalRootPlace] !== 0,
-    extras: extras.filter((extra) => extra.coefficient !== 0),
-  };
+export function columns(coefficients: Readonly<Record<BasisName, number>>, extras: readonly ExtraPower[]): Columns {
+  const { inverseCube, root, inverseRoot } = coefficients;
+  const present = extras.filter((extra) => extra.coefficient !== 0);
+  const isPlain = inverseCube === 0 && root === 0 && inverseRoot === 0 && present.length === 0;
+  return { ...coefficients, extras: present, isPlain };
 }
 
 /**
  * Value of a linear combination of the basis at one temperature.
  *
+ * @param c - the coefficients
  * @param temperatureK - above 0 K
  * @param lnTemperature - natural logarithm of the same temperature
  */
-export function evaluateColumns(combination: Columns, temperatureK: number, lnTemperature: number): number {
-  const c = combination.fixed;
-  const t = temperatureK;
-  const r = 1 / t;
+export function evaluateColumns(c: Columns, temperatureK: number, lnTemperature: number): number {
+  const r = 1 / temperatureK;
   const value =
-    lnTemperature * (c[9]! + t * c[10]!) +
-    (c[0]! + t * (c[1]! + t * (c[2]! + t * (c[3]! + t * (c[4]! + t * c[5]!)))) +
-      r * (c[6]! + r * (c[7]! + r * c[8]!)));
-  return combination.hasRoots || combination.extras.length !== 0 ? value + rootsAndExtras(combination, t) : value;
+    lnTemperature * (c.logarithm + temperatureK * c.linearLogarithm) +
+    (c.constant +
+      temperatureK *
+        (c.linear +
+          temperatureK * (c.square + temperatureK * (c.cube + temperatureK * (c.fourth + temperatureK * c.fifth)))) +
+      r * (c.inverse + r * c.inverseSquare));
+  return c.isPlain ? value : value + rareTerms(c, temperatureK, r);
 }
 
-function rootsAndExtras(combination: Columns, temperatureK: number): number {
-  let value = 0;
-  if (combination.hasRoots) {
-    const root = Math.sqrt(temperatureK);
-    value = combination.fixed[rootPlace]! * root + combination.fixed[reciprocalRootPlace]! / root;
-  }
+function rareTerms(combination: Columns, temperatureK: number, reciprocal: number): number {
+  const root = Math.sqrt(temperatureK);
+  let value =
+    combination.root * root +
+    (combination.inverseRoot / root + combination.inverseCube * reciprocal * reciprocal * reciprocal);
   for (const extra of combination.extras) value += extra.coefficient * powerOf(temperatureK, extra.exponent);
   return value;
 }
@@ -93,23 +102,15 @@ function rootsAndExtras(combination: Columns, temperatureK: number): number {
  */
 export function absoluteTerms(combination: Columns, temperatureK: number, lnTemperature: number): number {
   const logarithm = Math.abs(lnTemperature);
-  let sum = 0;
-  for (let place = 0; place < combination.fixed.length; place += 1) {
-    sum += Math.abs(combination.fixed[place]!) * basisValue(place, temperatureK, logarithm);
+  let sum =
+    Math.abs(combination.logarithm) * logarithm + Math.abs(combination.linearLogarithm) * temperatureK * logarithm;
+  for (const [name, power] of basis) {
+    if (power !== undefined) sum += Math.abs(combination[name]) * powerOf(temperatureK, power);
   }
   for (const extra of combination.extras) {
     sum += Math.abs(extra.coefficient) * powerOf(temperatureK, extra.exponent);
   }
   return sum;
-}
-
-function basisValue(place: number, temperatureK: number, logarithm: number): number {
-  if (place <= 5) return powerOf(temperatureK, place);
-  if (place <= 8) return powerOf(temperatureK, 5 - place);
-  if (place === logarithmPlace) return logarithm;
-  if (place === temperatureLogarithmPlace) return temperatureK * logarithm;
-  const root = Math.sqrt(temperatureK);
-  return place === rootPlace ? root : 1 / root;
 }
 
 /** T^n for n a multiple of 1/2, within 1 eps: by squaring in pairs of doubles, for squares double their error. */

@@ -16,9 +16,8 @@ export interface SeriesValues {
 /** Index of the interval that a temperature belongs to; -1 outside the range. */
 export function intervalIndex(plan: SeriesPlan, temperatureK: number): number {
   if (!(temperatureK >= plan.fromK && temperatureK <= plan.toK)) return -1;
-  const ends = plan.endsK;
   let index = 0;
-  while (temperatureK > ends[index]!) index += 1;
+  while (temperatureK > plan.endsK[index]!) index += 1;
   return index;
 }
 

@@ -1,4 +1,5 @@
 import { cut, type Fault, type FaultPath } from "../errors/fault.js";
+import { lnDecimal } from "../numeric/decimal-functions.js";
 import {
   addDecimals,
   decimalOf,
@@ -6,7 +7,6 @@ import {
   multiplyDecimals,
   negateDecimal,
 } from "../numeric/exact-decimal.js";
-import { lnDecimal } from "../numeric/decimal-functions.js";
 import type { HeatCapacityTerm } from "./exact-series.js";
 import type { HeatCapacityForm, PublishedInterval, PublishedSeries } from "./published-series.js";
 

@@ -12,13 +12,12 @@ import { log } from "../numeric/log.js";
 import type { Rational } from "../numeric/rational.js";
 import {
   absoluteTerms,
-  basis,
+  type BasisName,
   type Columns,
   columns,
   type ExtraPower,
-  logarithmPlace,
-  placeOfPower,
-  temperatureLogarithmPlace,
+  emptyColumns,
+  nameOfPower,
 } from "./columns.js";
 import { type ExactSeries, intervalAt, lowerEndK, type PiecewiseSeries, upperEndK } from "./exact-series.js";
 
@@ -63,7 +62,13 @@ export function mergeSeries(parts: readonly WeightedSeries[]): SeriesPlan | unde
   const denominator = parts.reduce((all, part) => leastCommonMultiple(all, part.coefficient.denominator), 1n);
   const weights = parts.map(({ coefficient }) => coefficient.numerator * (denominator / coefficient.denominator));
   const intervals = endsK.map((endK) =>
-    roundedColumns(sumOf(parts.map((part) => intervalAt(part.series, endK)), weights), denominator),
+    roundedColumns(
+      sumOf(
+        parts.map((part) => intervalAt(part.series, endK)),
+        weights,
+      ),
+      denominator,
+    ),
   );
   intervals.forEach((interval, index) => {
     refuseOverflow(interval, index === 0 ? fromK : endsK[index - 1]!, endsK[index]!);
@@ -138,31 +143,31 @@ function roundedColumns(sum: SeriesSum, denominator: bigint): IntervalColumns {
   const enthalpy = draft();
   const entropy = draft();
   const gibbsEnergy = draft();
-  const setPlace = (target: ColumnDraft, place: number, value: ExactDecimal): void => {
-    target.fixed[place] = decimalRatioToNumber(value, { mantissa: denominator, exponent: 0 });
+  const set = (target: ColumnDraft, name: BasisName, value: ExactDecimal): void => {
+    target.coefficients[name] = decimalRatioToNumber(value, { mantissa: denominator, exponent: 0 });
   };
   const addPower = (target: ColumnDraft, exponent: number, value: ExactDecimal, divisor: ExactDecimal): void => {
     const coefficient = decimalRatioToNumber(value, scaleDecimal(divisor, denominator));
-    const place = placeOfPower(exponent);
-    if (place === undefined) target.extras.push({ exponent, coefficient });
-    else target.fixed[place] = coefficient;
+    const name = nameOfPower(exponent);
+    if (name === undefined) target.extras.push({ exponent, coefficient });
+    else target.coefficients[name] = coefficient;
   };
   let gibbsConstant = sum.enthalpyConstant;
   let gibbsSlope = negateDecimal(sum.entropyConstant);
-  setPlace(enthalpy, 0, sum.enthalpyConstant);
-  setPlace(entropy, 0, sum.entropyConstant);
+  set(enthalpy, "constant", sum.enthalpyConstant);
+  set(entropy, "constant", sum.entropyConstant);
   for (const [exponent, c] of sum.terms) {
     if (c.mantissa === 0n) continue;
     addPower(heatCapacity, exponent, c, one);
     if (exponent === 0) {
-      setPlace(enthalpy, 1, c);
-      setPlace(entropy, logarithmPlace, c);
-      setPlace(gibbsEnergy, temperatureLogarithmPlace, negateDecimal(c));
+      set(enthalpy, "linear", c);
+      set(entropy, "logarithm", c);
+      set(gibbsEnergy, "linearLogarithm", negateDecimal(c));
       gibbsSlope = addDecimals(gibbsSlope, c);
     } else if (exponent === -1) {
-      setPlace(enthalpy, logarithmPlace, c);
+      set(enthalpy, "logarithm", c);
       addPower(entropy, -1, negateDecimal(c), one);
-      setPlace(gibbsEnergy, logarithmPlace, c);
+      set(gibbsEnergy, "logarithm", c);
       gibbsConstant = addDecimals(gibbsConstant, c);
     } else {
       const n = decimalOf(exponent);
@@ -172,8 +177,8 @@ function roundedColumns(sum: SeriesSum, denominator: bigint): IntervalColumns {
       addPower(gibbsEnergy, exponent + 1, negateDecimal(c), multiplyDecimals(n, next));
     }
   }
-  setPlace(gibbsEnergy, 0, gibbsConstant);
-  setPlace(gibbsEnergy, 1, gibbsSlope);
+  set(gibbsEnergy, "constant", gibbsConstant);
+  set(gibbsEnergy, "linear", gibbsSlope);
   return {
     heatCapacity: finished(heatCapacity),
     enthalpy: finished(enthalpy),
@@ -183,17 +188,17 @@ function roundedColumns(sum: SeriesSum, denominator: bigint): IntervalColumns {
 }
 
 interface ColumnDraft {
-  readonly fixed: Float64Array;
+  readonly coefficients: Record<BasisName, number>;
   readonly extras: ExtraPower[];
 }
 
 function draft(): ColumnDraft {
-  return { fixed: new Float64Array(basis.length), extras: [] };
+  return { coefficients: emptyColumns(), extras: [] };
 }
 
-function finished({ fixed, extras }: ColumnDraft): Columns {
+function finished({ coefficients, extras }: ColumnDraft): Columns {
   return columns(
-    fixed,
+    coefficients,
     extras.sort((a, b) => a.exponent - b.exponent),
   );
 }

@@ -1,6 +1,12 @@
 import { fail } from "../errors/gibbs-ledger-error.js";
 import { divideDecimals } from "../numeric/divide-decimals.js";
-import { addDecimals, decimalOf, type ExactDecimal, negateDecimal, subtractDecimals } from "../numeric/exact-decimal.js";
+import {
+  addDecimals,
+  decimalOf,
+  type ExactDecimal,
+  negateDecimal,
+  subtractDecimals,
+} from "../numeric/exact-decimal.js";
 import { exactFigureInSi, figureInSi } from "../quantity/figure-value.js";
 import { integralsAt } from "./exact-integrals.js";
 import { intervalAt, type PiecewiseSeries } from "./exact-series.js";

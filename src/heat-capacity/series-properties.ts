@@ -7,8 +7,8 @@ import type { Quantity, Temperature } from "../quantity/quantity.js";
 import { checkSeries, seriesKeys } from "./check-series.js";
 import { evaluateAll, intervalIndex, roundingBound, type SeriesFunction } from "./evaluate.js";
 import { lowerEndK, type PiecewiseSeries, upperEndK } from "./exact-series.js";
-import type { PublishedSeries } from "./published-series.js";
 import { type PlannedSeries, plannedSeries, planOfSeries } from "./planned-series.js";
+import type { PublishedSeries } from "./published-series.js";
 import { policyHint, type RangePolicy, rangePolicy } from "./range-policy.js";
 import { anchorOfFigures, readSeries } from "./read-series.js";
 
@@ -30,7 +30,6 @@ export interface SeriesProperties {
   /** 4 eps times the sum of the absolute terms, in the unit of the property. */
   readonly roundingBounds: Readonly<Record<SeriesFunction, number>>;
 }
-
 
 /** From a caller's fit to what was read of it. */
 const readOnce = new WeakMap<object, PlannedSeries>();
@@ -62,7 +61,7 @@ const readOnce = new WeakMap<object, PlannedSeries>();
  */
 export function seriesProperties(published: PublishedSeries, conditions: SeriesConditions): SeriesProperties {
   const read = readOf(published);
-  const temperatureK = temperatureInKelvin(conditions?.temperature, "temperature");
+  const temperatureK = temperatureInKelvin(conditions?.temperature, ["temperature"]);
   const plan = planOfSeries(read, rangePolicy(conditions.outsideRange));
   const index = intervalIndex(plan, temperatureK);
   if (index < 0) return failOutside(read.series, temperatureK);
@@ -91,10 +90,7 @@ function readOf(published: PublishedSeries): PlannedSeries {
   failIfAny(faults);
   const copy = frozenCopy(published);
   const { anchor } = copy;
-  const series = readSeries(
-    copy,
-    anchor === undefined ? {} : { anchor: anchorOfFigures(anchor) },
-  );
+  const series = readSeries(copy, anchor === undefined ? {} : { anchor: anchorOfFigures(anchor) });
   const read = plannedSeries(series);
   readOnce.set(published, read);
   return read;

@@ -2,7 +2,13 @@ import { Decimal } from "decimal.js";
 import { describeReceived, type Fault } from "../errors/fault.js";
 import { fail, failIfAny } from "../errors/gibbs-ledger-error.js";
 import { checkObject } from "../errors/input.js";
-import { type ExactSeries, intervalAt, lowerEndK, type PiecewiseSeries, upperEndK } from "../heat-capacity/exact-series.js";
+import {
+  type ExactSeries,
+  intervalAt,
+  lowerEndK,
+  type PiecewiseSeries,
+  upperEndK,
+} from "../heat-capacity/exact-series.js";
 import { type ExactDecimal, exactDecimalOfDouble } from "../numeric/exact-decimal.js";
 import { parseRational, type Rational } from "../numeric/rational.js";
 import { temperatureInKelvin } from "../quantity/guards.js";
@@ -74,7 +80,7 @@ const mostDigits = 200;
 export function evaluateToDigits(reaction: Reaction, conditions: DigitsConditions): PreciseReactionProperties {
   const house = houseReaction(reaction);
   const digits = checkDigits(conditions);
-  const temperatureK = temperatureInKelvin(conditions.temperature, "temperature");
+  const temperatureK = temperatureInKelvin(conditions.temperature, ["temperature"]);
   const doubles = standardReactionProperties(house, { temperature: { value: temperatureK, unit: "K" } });
   // Where the terms cancel further, the digits are not enough, and what more of them cancel too is zero.
   const first = sumToDigits(house, temperatureK, digits + guardDigits);
@@ -159,7 +165,10 @@ function digitsBetween(value: WideDecimal, scale: WideDecimal): number {
 
 function checkDigits(conditions: DigitsConditions): number {
   const faults: Fault[] = [];
-  const members = checkObject(conditions, ["conditions"], faults, { required: ["temperature", "digits"], optional: [] });
+  const members = checkObject(conditions, [], faults, {
+    required: ["temperature", "digits"],
+    optional: [],
+  });
   failIfAny(faults);
   const digits = members?.digits;
   if (typeof digits === "number" && Number.isInteger(digits) && digits >= 1 && digits <= mostDigits) return digits;

@@ -2,7 +2,7 @@ import { roundRatio } from "../numeric/exact-decimal.js";
 import { type UnitCode, unitEntry } from "./units.js";
 
 /** How a value in one unit becomes a value in another: value * ratio + shift, as exact fractions and as doubles. */
-export interface Conversion {
+interface Conversion {
   readonly ratioNumerator: bigint;
   readonly ratioDenominator: bigint;
   readonly shiftNumerator: bigint;
@@ -41,11 +41,8 @@ const uncertain = 7.888609052210118e-31;
  * scale (-273.15 Cel, -459.67 [degF]) stands for absolute zero and becomes it on another.
  */
 export function convertValue(value: number, from: UnitCode, to: UnitCode): number {
-  return from === to ? value + 0 : convertBy(conversionOf(from, to), value);
-}
-
-/** As `convertValue`, by a conversion looked up before: for callers that convert the same way again and again. */
-export function convertBy(conversion: Conversion, value: number): number {
+  if (from === to) return value + 0;
+  const conversion = conversionOf(from, to);
   return conversion.shiftHigh === 0 ? scale(value, conversion) : scaleAndShift(value, conversion);
 }
 
@@ -109,8 +106,7 @@ function exactResult(value: number, conversion: Conversion, shiftNumerator: bigi
   );
 }
 
-/** The conversion between two units of one dimension, prepared once. */
-export function conversionOf(from: UnitCode, to: UnitCode): Conversion {
+function conversionOf(from: UnitCode, to: UnitCode): Conversion {
   let fromThere = conversions.get(from);
   if (fromThere === undefined) {
     fromThere = new Map();

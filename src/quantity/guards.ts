@@ -2,7 +2,7 @@ import { describeReceived, type Fault, type FaultPath } from "../errors/fault.js
 import { fail, failIfAny } from "../errors/gibbs-ledger-error.js";
 import { forbiddenKeys } from "../errors/input.js";
 import { belowAbsoluteZero, checkParts, lowestValue, overflow } from "./check-parts.js";
-import { type Conversion, conversionOf, convertBy, convertValue } from "./convert-value.js";
+import { convertValue } from "./convert-value.js";
 import { type Dimension, isUnitCode, siUnits, type UnitCode } from "./units.js";
 
 interface Reading {
@@ -11,14 +11,8 @@ interface Reading {
   readonly standardUncertainty?: unknown;
 }
 
-/** What 273.15 has beyond its nearest double. */
-const celsiusZeroLow = 2.2737367544323207e-14;
-/** 2^-100: bound of the error of the terms below the sum, relative to the larger of its parts. */
-const uncertain = 7.888609052210118e-31;
-
-/** Conversions to kelvin, made at first use. */
-let fahrenheit: Conversion | undefined;
-let rankine: Conversion | undefined;
+/** What null and undefined have for parts. */
+const nothing: Reading = {};
 
 const quantityKeys: readonly string[] = ["value", "unit", "standardUncertainty"];
 
@@ -32,23 +26,19 @@ const quantityKeys: readonly string[] = ["value", "unit", "standardUncertainty"]
  * @throws GibbsLedgerError "quantity/not-a-quantity", "quantity/not-finite", "quantity/unknown-unit",
  * "quantity/wrong-dimension", "quantity/below-absolute-zero", "quantity/not-positive", "quantity/overflow"
  * @example
- * temperatureInKelvin({ value: 25, unit: "Cel" }, "temperature"); // => 298.15
+ * temperatureInKelvin({ value: 25, unit: "Cel" }, ["temperature"]); // => 298.15
  */
-export function temperatureInKelvin(value: unknown, ...path: (string | number)[]): number {
-  if (typeof value !== "object" || value === null) return fail(notAQuantity(value, "temperature", path));
-  const { value: number, unit } = value as Reading;
-  if (typeof number === "number") {
-    if (unit === "K") {
-      if (number > 0 && number < Infinity) return number;
-    } else if (unit === "Cel") {
-      if (number > -273.15 && number < Infinity) return kelvinOfCelsius(number);
-    } else if (unit === "[degF]") {
-      if (number > -459.67 && number < Infinity) return convertBy((fahrenheit ??= conversionOf(unit, "K")), number);
-    } else if (unit === "[degR]" && number > 0 && number < Infinity) {
-      return convertBy((rankine ??= conversionOf(unit, "K")), number);
+export function temperatureInKelvin(value: unknown, path?: FaultPath): number {
+  const { value: number, unit }: Reading = value ?? nothing;
+  // The limits of the short ways are explained below. All else, faults included, goes the slow way.
+  if (typeof number === "number" && number < 1e15) {
+    if (unit === "K" && number > 0) return number;
+    if (number > 1e-6 || (number < -1e-6 && number > -273)) {
+      if (unit === "Cel") return kelvinOfCelsius(number);
+      if (unit === "[degF]" || (unit === "[degR]" && number > 0)) return kelvinOfNinths(number, unit === "[degF]");
     }
   }
-  return positive(number, unit, "temperature", path);
+  return positive(value, number, unit, "temperature", path);
 }
 
 /**
@@ -61,11 +51,10 @@ export function temperatureInKelvin(value: unknown, ...path: (string | number)[]
  * @throws GibbsLedgerError "quantity/not-a-quantity", "quantity/not-finite", "quantity/unknown-unit",
  * "quantity/wrong-dimension", "quantity/not-positive", "quantity/overflow"
  * @example
- * pressureInPascal({ value: 1, unit: "atm" }, "pressure"); // => 101325
+ * pressureInPascal({ value: 1, unit: "atm" }, ["pressure"]); // => 101325
  */
-export function pressureInPascal(value: unknown, ...path: (string | number)[]): number {
-  if (typeof value !== "object" || value === null) return fail(notAQuantity(value, "pressure", path));
-  const { value: number, unit } = value as Reading;
+export function pressureInPascal(value: unknown, path?: FaultPath): number {
+  const { value: number, unit }: Reading = value ?? nothing;
   if (typeof number === "number" && number > 0 && number < 1e290) {
     // These factors are whole numbers, so one product is already the nearest double.
     switch (unit) {
@@ -82,7 +71,7 @@ export function pressureInPascal(value: unknown, ...path: (string | number)[]): 
       default:
     }
   }
-  return positive(number, unit, "pressure", path);
+  return positive(value, number, unit, "pressure", path);
 }
 
 /**
@@ -97,7 +86,7 @@ export function pressureInPascal(value: unknown, ...path: (string | number)[]): 
  * @example
  * siValue({ value: -32.9, unit: "kJ/mol" }, "molarEnergy"); // => -32900
  */
-export function siValue(value: unknown, dimension: Dimension, ...path: (string | number)[]): number {
+export function siValue(value: unknown, dimension: Dimension, path: FaultPath = []): number {
   if (typeof value !== "object" || value === null) return fail(notAQuantity(value, dimension, path));
   const { value: number, unit } = value as Reading;
   return siOfParts(number, unit, dimension, path);
@@ -169,18 +158,37 @@ export function notAQuantity(value: unknown, dimension: Dimension | undefined, p
   };
 }
 
-/** Sum and rounding error of value + 273.15; where the rounding is not decided by both, exact integers decide. */
+/*
+ * The short ways to kelvin round right for 1e-6 < |value| < 1e15 and value > -273. Their errors of second order, some
+ * 2^-100 of the value, are smaller than the distance of the exact result from the nearest midpoint between two
+ * doubles: that is a multiple of the last place of the value divided by 180, and not zero, for 273.15 and 459.67 are no
+ * binary fractions, and five ninths of a double are never a midpoint. The small numbers are what 273.15 and 459.67 have
+ * beyond their nearest doubles.
+ */
+
+/** value + 273.15, from the sum and its rounding error. */
 function kelvinOfCelsius(value: number): number {
   const sum = value + 273.15;
   const back = sum - value;
-  const rest = value - (sum - back) + (273.15 - back) + celsiusZeroLow;
-  const bound = uncertain * ((value < 0 ? -value : value) + 273.15);
-  const result = sum + (rest - bound);
-  return result === sum + (rest + bound) ? result : convertValue(value, "Cel", "K");
+  return sum + (value - (sum - back) + (273.15 - back) + 2.2737367544323207e-14);
 }
 
-/** The slow way through a positive quantity: rarer units, and every fault. */
-function positive(value: unknown, unit: unknown, dimension: Dimension, path: FaultPath): number {
+/**
+ * (value + zero) 5/9 with zero 459.67 or none: the sum, its rounding error, the nearest double to sum 5/9, and the
+ * exact remainder 5 sum - 9 quotient.
+ */
+function kelvinOfNinths(value: number, isFahrenheit: boolean): number {
+  const zero = isFahrenheit ? 459.67 : 0;
+  const sum = value + zero;
+  const back = sum - value;
+  const rest = value - (sum - back) + (zero - back) + (isFahrenheit ? -1.5916157281026244e-14 : 0);
+  const quotient = sum * (5 / 9);
+  return quotient + (4 * sum - 8 * quotient + (sum - quotient) + 5 * rest) * (1 / 9);
+}
+
+/** The slow way through a positive quantity whose parts were read: rarer units, and every fault. */
+function positive(whole: unknown, value: unknown, unit: unknown, dimension: Dimension, path: FaultPath = []): number {
+  if (typeof whole !== "object" || whole === null) return fail(notAQuantity(whole, dimension, path));
   const si = siOfParts(value, unit, dimension, path);
   return si > 0 ? si : fail(notPositive(si, dimension, path));
 }

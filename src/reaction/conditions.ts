@@ -94,7 +94,8 @@ export function reactionState(reaction: Reaction, conditions: ReactionConditions
   const before = faults.length;
   const inerts = collectInerts(members?.inerts, reaction, faults);
   const activities = collectActivities(members?.activities, reaction, faults);
-  const gas = members?.gas === undefined ? undefined : collectGas(conditions, reaction, inerts, activities, pressurePa, faults);
+  const gas =
+    members?.gas === undefined ? undefined : collectGas(conditions, reaction, inerts, activities, pressurePa, faults);
   // What is missing shows only in phases that are sound, and partial pressures need the pressure.
   const isReadable = pressurePa !== undefined || members?.gas === undefined;
   if (faults.length === before && isReadable) requireActivities(reaction, gas, activities, faults);

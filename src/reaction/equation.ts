@@ -151,7 +151,8 @@ function readTerm({ text, start }: Slice, faults: Fault[]): EquationTerm {
     faults.push({
       code: "reaction/syntax",
       path: ["equation"],
-      message: body === "" ? `a term is missing at character ${position}` : `${describeReceived(body)} names no species`,
+      message:
+        body === "" ? `a term is missing at character ${position}` : `${describeReceived(body)} names no species`,
       received: describeReceived(body),
       expected: "a coefficient and a species, such as 3 H2(g)",
       ...(body === "" ? { hint: "charges are written after a caret, as Fe^3+" } : {}),

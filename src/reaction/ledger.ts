@@ -7,13 +7,14 @@ import type { Figure } from "../quantity/figure.js";
 import { figureStandardUncertainty } from "../quantity/figure-value.js";
 import type { Quantity } from "../quantity/quantity.js";
 import type { Source } from "../references/source.js";
-import { speciesGrade, type SpeciesGrade } from "../species/grade.js";
+import { type SpeciesGrade, speciesGrade } from "../species/grade.js";
 import type { Label, SpeciesRecord } from "../species/record.js";
 import { speciesPlan, standardPressureEntropy } from "../species/species-function.js";
 import type { ReactionConditions, ReactionState, TermState } from "./conditions.js";
 import type { Reaction } from "./reaction.js";
+import { reactionPlans } from "./reaction.js";
 import { gibbsEnergyOf, lnQuotientOf, stateOfPresent } from "./reaction-gibbs-energy.js";
-import { labelsOutside, reactionPlans } from "./reaction-plan.js";
+import { labelsOutside } from "./reaction-plan.js";
 import type { StandardStates } from "./standard-state.js";
 
 /** What an entry of a ledger accounts for. */
@@ -101,7 +102,7 @@ const groups: readonly LedgerGroup[] = ["formation", "temperature", "conditions"
  *   pressure: quantity(1, "bar"),
  *   gas: { moleFractions: { "N2(g)": 0.2, "H2(g)": 0.6, "NH3(g)": 0.2 } },
  * });
- * account.entries.length; // => 21
+ * account.entries.length; // => 18
  */
 export function ledger(reaction: Reaction, conditions: ReactionConditions): Ledger {
   const plans = reactionPlans(reaction);
@@ -264,7 +265,12 @@ function sourceOf({ gibbsFunction, formationEnthalpy }: SpeciesRecord): { readon
 
 function secondSource(species: SpeciesRecord, figure: Figure | undefined): { readonly secondSource?: Source } {
   const first = sourceOf(species).source;
-  return figure === undefined || figure.source === first ? {} : { secondSource: figure.source };
+  return figure === undefined || isSameSource(figure.source, first) ? {} : { secondSource: figure.source };
+}
+
+/** Sources in a user's own words are the same where the words are. */
+function isSameSource(a: Source, b: Source | undefined): boolean {
+  return typeof a === "object" && typeof b === "object" ? a.text === b.text : a === b;
 }
 
 /** Independent entries add in quadrature: each datum stands in one entry only. */

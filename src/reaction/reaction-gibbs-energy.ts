@@ -5,9 +5,16 @@ import { evaluateAt, intervalIndex, roundingBound } from "../heat-capacity/evalu
 import { exactDot } from "../numeric/compensated.js";
 import { log } from "../numeric/log.js";
 import type { Quantity } from "../quantity/quantity.js";
-import { checkZeroActivities, lnActivity, type ReactionConditions, type ReactionState, reactionState } from "./conditions.js";
+import {
+  checkZeroActivities,
+  lnActivity,
+  type ReactionConditions,
+  type ReactionState,
+  reactionState,
+} from "./conditions.js";
 import type { Reaction } from "./reaction.js";
-import { failReactionRange, reactionPlan, reactionPlans } from "./reaction-plan.js";
+import { reactionPlans } from "./reaction.js";
+import { failReactionRange, reactionPlan } from "./reaction-plan.js";
 
 /** Which way a reaction runs at a composition, and why. */
 export interface ReactionDirection {

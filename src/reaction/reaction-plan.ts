@@ -3,31 +3,17 @@ import { fail, GibbsLedgerError } from "../errors/gibbs-ledger-error.js";
 import { mergeSeries, type SeriesPlan } from "../heat-capacity/merge.js";
 import { extendSeries, policyHint, type RangePolicy, rangePolicy } from "../heat-capacity/range-policy.js";
 import { parseRational, type Rational } from "../numeric/rational.js";
+import type { Label } from "../species/record.js";
 import { speciesPlan, speciesSeries } from "../species/species-function.js";
 import { isInRange, outsideRangeFault } from "../species/standard-properties.js";
-import type { Label } from "../species/record.js";
-import { houseReaction, type Reaction } from "./reaction.js";
-import { type StandardStates, standardStateOf } from "./standard-state.js";
-
-/** What the house knows of a reaction: its merged series by range policy, made when first asked for. */
-export interface ReactionPlans {
-  readonly reaction: Reaction;
-  readonly standardStates: StandardStates;
-  /** The plan of the usual policy stands by itself: looking it up by name would cost as much as evaluating it. */
-  refuse: SeriesPlan | undefined;
-  readonly others: Map<RangePolicy, SeriesPlan>;
-}
-
-const plansOfReaction = new WeakMap<Reaction, ReactionPlans>();
-
-/** The plans of a reaction; one that is not of the house is checked, copied and frozen first. */
-export function reactionPlans(reaction: Reaction): ReactionPlans {
-  return plansOfReaction.get(reaction) ?? makePlans(reaction);
-}
+import type { Reaction, ReactionPlans } from "./reaction.js";
 
 /** The merged series of a reaction under a policy; absent: refuse. */
 export function reactionPlan(plans: ReactionPlans, policy: RangePolicy | undefined): SeriesPlan {
-  if (policy === undefined && plans.refuse !== undefined) return plans.refuse;
+  return policy === undefined && plans.refuse !== undefined ? plans.refuse : otherPlan(plans, policy);
+}
+
+function otherPlan(plans: ReactionPlans, policy: RangePolicy | undefined): SeriesPlan {
   return plans.others.get(policy ?? "refuse") ?? makePlan(plans, rangePolicy(policy));
 }
 
@@ -38,11 +24,7 @@ export function labelsOutside(reaction: Reaction, temperatureK: number): readonl
 }
 
 /** Throws that a temperature lies outside the range of one or more species, naming each. */
-export function failReactionRange(
-  reaction: Reaction,
-  temperatureK: number,
-  path: FaultPath = ["temperature"],
-): never {
+export function failReactionRange(reaction: Reaction, temperatureK: number, path: FaultPath = ["temperature"]): never {
   const faults = reaction.terms
     .filter(({ species }) => !isInRange(species, temperatureK))
     .map(({ species }) => outsideRangeFault(species, temperatureK, path));
@@ -52,18 +34,6 @@ export function failReactionRange(
 }
 
 const noLabels: readonly Label[] = Object.freeze([]);
-
-function makePlans(value: Reaction): ReactionPlans {
-  const reaction = houseReaction(value);
-  let plans = plansOfReaction.get(reaction);
-  if (plans === undefined) {
-    const states = reaction.terms.map(({ label, species }) => [label, standardStateOf(species)] as const);
-    plans = { reaction, standardStates: Object.freeze(Object.fromEntries(states)), refuse: undefined, others: new Map() };
-    plansOfReaction.set(reaction, plans);
-  }
-  if (value !== reaction) plansOfReaction.set(value, plans);
-  return plans;
-}
 
 function makePlan(plans: ReactionPlans, policy: RangePolicy): SeriesPlan {
   const merged = mergeSeries(

@@ -2,6 +2,8 @@ import { cut, describeReceived, type Fault, type FaultPath } from "../errors/fau
 import { frozenCopy } from "../errors/frozen-copy.js";
 import { failIfAny } from "../errors/gibbs-ledger-error.js";
 import { checkArray, checkObject, checkText } from "../errors/input.js";
+import type { SeriesPlan } from "../heat-capacity/merge.js";
+import type { RangePolicy } from "../heat-capacity/range-policy.js";
 import {
   addRationals,
   isZeroRational,
@@ -17,6 +19,7 @@ import type { CollectionData, Label, SpeciesRecord } from "../species/record.js"
 import { checkBalance, type Stoichiometry } from "./balance-check.js";
 import { checkCoefficients } from "./check-coefficients.js";
 import { type EquationTerm, maximumSpecies, parseEquation } from "./equation.js";
+import { type StandardStates, standardStateOf } from "./standard-state.js";
 
 /** A species of a reaction with its stoichiometric number: negative for reactants, positive for products. */
 export interface ReactionTerm {
@@ -37,8 +40,25 @@ export interface Reaction {
   readonly notes: readonly string[];
 }
 
-/** From a caller's object, and from the house's own, to the checked and frozen reaction. */
-const houseReactions = new WeakMap<object, Reaction>();
+/** What the house knows of a reaction: its merged series by range policy, made when first asked for. */
+export interface ReactionPlans {
+  readonly reaction: Reaction;
+  readonly standardStates: StandardStates;
+  /** The plan of the usual policy stands by itself: looking it up by name costs as much as evaluating it. */
+  refuse: SeriesPlan | undefined;
+  readonly others: Map<RangePolicy, SeriesPlan>;
+}
+
+/**
+ * Where a reaction of the house carries its plans, hidden from JSON, clones and copies. A WeakMap would do, but the
+ * bench shows that it costs half as much again as the evaluation itself.
+ */
+const plansKey: unique symbol = Symbol("plans");
+
+type HouseReaction = Reaction & { readonly [plansKey]: ReactionPlans };
+
+/** From a caller's object, such as a reaction of another copy of the package or from JSON, to the house's own. */
+const adopted = new WeakMap<object, HouseReaction>();
 
 /**
  * Reads a chemical equation against a collection and checks that it balances, elements and charge, exactly.
@@ -110,11 +130,20 @@ export function reaction(equation: string, collection: CollectionData): Reaction
  * wrong records
  */
 export function houseReaction(value: Reaction): Reaction {
-  const known = typeof value === "object" && value !== null ? houseReactions.get(value) : undefined;
-  return known ?? adoptReaction(value);
+  return reactionPlans(value).reaction;
 }
 
-function adoptReaction(value: unknown): Reaction {
+/** The plans of a reaction; one that is not of the house is checked, copied and frozen first. */
+export function reactionPlans(value: Reaction): ReactionPlans {
+  return (value as HouseReaction | null | undefined)?.[plansKey] ?? foreignPlans(value);
+}
+
+function foreignPlans(value: unknown): ReactionPlans {
+  const known = typeof value === "object" && value !== null ? adopted.get(value) : undefined;
+  return (known ?? adoptReaction(value))[plansKey];
+}
+
+function adoptReaction(value: unknown): HouseReaction {
   const faults: Fault[] = [];
   if (typeof value !== "object" || value === null || !Array.isArray((value as { terms?: unknown }).terms)) {
     faults.push({
@@ -148,7 +177,7 @@ function adoptReaction(value: unknown): Reaction {
   }
   failIfAny(faults);
   const house = register(terms, notes as string[]);
-  houseReactions.set(value as object, house);
+  adopted.set(value as object, house);
   return house;
 }
 
@@ -184,7 +213,7 @@ function checkTerm(value: unknown, path: FaultPath, faults: Fault[]): Stoichiome
   return [{ species, coefficient: exact }];
 }
 
-function register(stoichiometry: readonly Stoichiometry[], notes: readonly string[]): Reaction {
+function register(stoichiometry: readonly Stoichiometry[], notes: readonly string[]): HouseReaction {
   const ordered = [
     ...stoichiometry.filter(({ coefficient }) => coefficient.numerator < 0n),
     ...stoichiometry.filter(({ coefficient }) => coefficient.numerator > 0n),
@@ -197,13 +226,15 @@ function register(stoichiometry: readonly Stoichiometry[], notes: readonly strin
       species,
     }),
   );
-  const house: Reaction = Object.freeze({
-    equation: equationOf(ordered),
-    terms: Object.freeze(terms),
-    notes: frozenCopy(notes),
-  });
-  houseReactions.set(house, house);
-  return house;
+  const house = { equation: equationOf(ordered), terms: Object.freeze(terms), notes: frozenCopy(notes) };
+  const states = terms.map(({ label, species }) => [label, standardStateOf(species)] as const);
+  const plans: ReactionPlans = {
+    reaction: house,
+    standardStates: Object.freeze(Object.fromEntries(states)),
+    refuse: undefined,
+    others: new Map(),
+  };
+  return Object.freeze(Object.defineProperty(house, plansKey, { value: plans }) as HouseReaction);
 }
 
 function equationOf(terms: readonly Stoichiometry[]): string {

@@ -1,5 +1,6 @@
-import { fail } from "../errors/gibbs-ledger-error.js";
 import { gasConstantJPerMolK } from "../constants/constants.js";
+import type { FaultPath } from "../errors/fault.js";
+import { fail } from "../errors/gibbs-ledger-error.js";
 import { evaluateColumns } from "../heat-capacity/columns.js";
 import { evaluateAll, intervalIndex, roundingBound, type SeriesFunction } from "../heat-capacity/evaluate.js";
 import type { RangePolicy } from "../heat-capacity/range-policy.js";
@@ -9,7 +10,8 @@ import { temperatureInKelvin } from "../quantity/guards.js";
 import type { Quantity, Temperature } from "../quantity/quantity.js";
 import type { Label } from "../species/record.js";
 import type { Reaction } from "./reaction.js";
-import { failReactionRange, labelsOutside, reactionPlan, reactionPlans } from "./reaction-plan.js";
+import { reactionPlans } from "./reaction.js";
+import { failReactionRange, labelsOutside, reactionPlan } from "./reaction-plan.js";
 import type { StandardStates } from "./standard-state.js";
 
 /** Temperature of a standard reaction property, and what to do outside the range of a species. */
@@ -36,6 +38,9 @@ export interface StandardReactionProperties {
   /** Labels of the species evaluated outside their own range. */
   readonly outsideRange: readonly Label[];
 }
+
+/** Made once: a call that is right makes no path. */
+const temperaturePath: FaultPath = ["temperature"];
 
 /** 1 / ln 10 */
 const log10OfE = Math.LOG10E;
@@ -68,12 +73,12 @@ export function standardReactionGibbsEnergy(
   conditions: StandardReactionConditions,
 ): Quantity<"molarEnergy", "J/mol"> {
   const plans = reactionPlans(reaction);
-  const temperatureK = temperatureInKelvin(conditions?.temperature, "temperature");
+  const temperatureK = temperatureInKelvin(conditions?.temperature, temperaturePath);
   const plan = reactionPlan(plans, conditions.outsideRange);
   const index = intervalIndex(plan, temperatureK);
-  if (index < 0) return failReactionRange(plans.reaction, temperatureK);
-  const combination = plan.intervals[index]!.gibbsEnergy;
-  return { value: evaluateColumns(combination, temperatureK, log(temperatureK)) + 0, unit: "J/mol" };
+  if (index < 0) return failReactionRange(reaction, temperatureK);
+  const { gibbsEnergy } = plan.intervals[index]!;
+  return { value: evaluateColumns(gibbsEnergy, temperatureK, log(temperatureK)) + 0, unit: "J/mol" };
 }
 
 /**
@@ -95,7 +100,7 @@ export function standardReactionProperties(
   conditions: StandardReactionConditions,
 ): StandardReactionProperties {
   const plans = reactionPlans(reaction);
-  const temperatureK = temperatureInKelvin(conditions?.temperature, "temperature");
+  const temperatureK = temperatureInKelvin(conditions?.temperature, temperaturePath);
   const policy = conditions.outsideRange;
   const plan = reactionPlan(plans, policy);
   const index = intervalIndex(plan, temperatureK);
@@ -127,7 +132,7 @@ export function standardReactionProperties(
  */
 export function equilibriumConstant(reaction: Reaction, conditions: StandardReactionConditions): number {
   const { value } = standardReactionGibbsEnergy(reaction, conditions);
-  const temperatureK = temperatureInKelvin(conditions.temperature, "temperature");
+  const temperatureK = temperatureInKelvin(conditions.temperature, temperaturePath);
   const lnK = lnOfConstant(value, temperatureK);
   if (lnK > smallestLnK && lnK < largestLnK) return exp(lnK);
   return fail({
@@ -154,7 +159,7 @@ export function standardReactionRoundingBound(
   conditions: StandardReactionConditions,
 ): number {
   const plans = reactionPlans(reaction);
-  const temperatureK = temperatureInKelvin(conditions?.temperature, "temperature");
+  const temperatureK = temperatureInKelvin(conditions?.temperature, temperaturePath);
   const plan = reactionPlan(plans, conditions.outsideRange);
   const index = intervalIndex(plan, temperatureK);
   if (index < 0) return failReactionRange(plans.reaction, temperatureK);

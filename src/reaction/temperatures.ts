@@ -8,9 +8,10 @@ import { findRoot } from "../numeric/root.js";
 import { checkPositiveQuantity, checkQuantity } from "../quantity/guards.js";
 import type { MolarEnergy, Quantity, Temperature } from "../quantity/quantity.js";
 import type { ReactionConditions } from "./conditions.js";
-import { gibbsEnergyOf, stateOfPresent } from "./reaction-gibbs-energy.js";
 import type { Reaction } from "./reaction.js";
-import { failReactionRange, reactionPlan, reactionPlans } from "./reaction-plan.js";
+import { reactionPlans } from "./reaction.js";
+import { gibbsEnergyOf, stateOfPresent } from "./reaction-gibbs-energy.js";
+import { failReactionRange, reactionPlan } from "./reaction-plan.js";
 
 /** Where to look for temperatures, and at what Gibbs energy and conditions. */
 export interface TemperatureSearch {

@@ -111,7 +111,8 @@ const entries = {
   },
   mcbride2002: {
     authors: "B. J. McBride, M. J. Zehe, S. Gordon",
-    title: "NASA Glenn Coefficients for Calculating Thermodynamic Properties of Individual Species, NASA/TP-2002-211556",
+    title:
+      "NASA Glenn Coefficients for Calculating Thermodynamic Properties of Individual Species, NASA/TP-2002-211556",
     year: 2002,
   },
   mcquarrie2000: {

@@ -1,5 +1,8 @@
-import type { Source } from "../references/source.js";
+import type { Fault } from "../errors/fault.js";
+import { failIfAny } from "../errors/gibbs-ledger-error.js";
+import { checkObject } from "../errors/input.js";
 import type { Ledger, LedgerEntry, LedgerGroup, LedgerSum } from "../reaction/ledger.js";
+import type { Source } from "../references/source.js";
 import { caution } from "./caution.js";
 import { layOut, row, rule, type TextColumn } from "./columns.js";
 import { fitted, fixed, wrap } from "./text.js";
@@ -27,6 +30,7 @@ const groups: readonly LedgerGroup[] = ["formation", "temperature", "conditions"
  * another source than the value.
  *
  * @param account - what {@link ledger} returned
+ * @throws GibbsLedgerError "input/not-an-object", "input/missing" where it is no ledger
  * @returns lines joined by line feeds, each at most 80 characters long
  * @example
  * import { referenceData } from "gibbs-ledger/data";
@@ -40,6 +44,7 @@ const groups: readonly LedgerGroup[] = ["formation", "temperature", "conditions"
  * text.split("\n")[0]; // => "Gibbs energy of reaction, per mole of reaction as written"
  */
 export function formatLedger(account: Ledger): string {
+  checkAccount(account);
   const body = groups.flatMap((group) => [
     ...account.entries.filter((entry) => entry.group === group).map(entryCells),
     sumCells(group, account.subtotals[group]),
@@ -63,6 +68,13 @@ export function formatLedger(account: Ledger): string {
     "",
     ...wrap(caution),
   ].join("\n");
+}
+
+function checkAccount(account: unknown): void {
+  const faults: Fault[] = [];
+  const required = ["equation", "temperature", "pressure", "entries", "subtotals", "total"] as const;
+  checkObject(account, ["account"], faults, { required, optional: "any" });
+  failIfAny(faults);
 }
 
 function conditionsLine({ temperature, pressure, equationOfState }: Ledger): string {

@@ -1,13 +1,15 @@
 import { gasConstantJPerMolK } from "../constants/constants.js";
 import { describeReceived, type Fault } from "../errors/fault.js";
 import { failIfAny } from "../errors/gibbs-ledger-error.js";
-import { checkArray, checkObject } from "../errors/input.js";
-import type { RangePolicy } from "../heat-capacity/range-policy.js";
+import { checkArray, checkObject, checkOption } from "../errors/input.js";
+import { intervalIndex } from "../heat-capacity/evaluate.js";
+import { type RangePolicy, rangePolicies } from "../heat-capacity/range-policy.js";
 import { exactSum } from "../numeric/compensated.js";
 import { figureStandardUncertainty } from "../quantity/figure-value.js";
-import { temperatureInKelvin } from "../quantity/guards.js";
+import { checkPositiveQuantity } from "../quantity/guards.js";
 import type { Temperature } from "../quantity/quantity.js";
-import { houseReaction, type Reaction } from "../reaction/reaction.js";
+import { type Reaction, reactionPlans } from "../reaction/reaction.js";
+import { failReactionRange, reactionPlan } from "../reaction/reaction-plan.js";
 import { standardReactionProperties } from "../reaction/standard-reaction.js";
 import { caution } from "./caution.js";
 import { layOut, type TextColumn } from "./columns.js";
@@ -49,27 +51,18 @@ const units = ["K", "1", "1", "kJ/mol", "kJ/mol", "kJ/mol", "J/mol/K"];
  * text.split("\n").length > 5; // => true
  */
 export function formatReactionTable(reaction: Reaction, options: ReactionTableOptions): string {
-  const house = houseReaction(reaction);
-  const faults: Fault[] = [];
-  const members = checkObject(options, ["options"], faults, { required: ["temperatures"], optional: ["outsideRange"] });
-  failIfAny(faults);
-  const temperatures = checkArray(members?.temperatures, ["temperatures"], faults) ?? [];
-  if (faults.length === 0 && temperatures.length === 0) {
-    faults.push({
-      code: "report/no-rows",
-      path: ["temperatures"],
-      message: `a table needs at least one temperature, got ${describeReceived(temperatures)}`,
-      expected: "at least one temperature",
-    });
-  }
-  failIfAny(faults);
+  const plans = reactionPlans(reaction);
+  const house = plans.reaction;
+  const { temperaturesK, outsideRange } = checkOptions(options);
   const outside = new Set<string>();
   let lowerBound = false;
-  const rows = options.temperatures.map((temperature, index) => {
-    const temperatureK = temperatureInKelvin(temperature, "temperatures", index);
+  const rows = temperaturesK.map((temperatureK, index) => {
+    if (intervalIndex(reactionPlan(plans, outsideRange), temperatureK) < 0) {
+      return failReactionRange(house, temperatureK, ["temperatures", index]);
+    }
     const properties = standardReactionProperties(house, {
-      temperature,
-      ...(options.outsideRange === undefined ? {} : { outsideRange: options.outsideRange }),
+      temperature: { value: temperatureK, unit: "K" },
+      ...(outsideRange === undefined ? {} : { outsideRange }),
     });
     for (const label of properties.outsideRange) outside.add(label);
     const uncertainty = uncertaintyOfLog10K(house, temperatureK);
@@ -102,6 +95,34 @@ export function formatReactionTable(reaction: Reaction, options: ReactionTableOp
     ...(outside.size === 0 ? [] : wrap(`outside their range: ${[...outside].join(", ")}`)),
     ...wrap(caution),
   ].join("\n");
+}
+
+interface CheckedOptions {
+  readonly temperaturesK: readonly number[];
+  readonly outsideRange: RangePolicy | undefined;
+}
+
+function checkOptions(options: ReactionTableOptions): CheckedOptions {
+  const faults: Fault[] = [];
+  const members = checkObject(options, [], faults, { required: ["temperatures"], optional: ["outsideRange"] });
+  failIfAny(members === undefined ? faults : []);
+  const { temperatures, outsideRange } = members ?? {};
+  const given = temperatures === undefined ? undefined : checkArray(temperatures, ["temperatures"], faults);
+  if (given?.length === 0) {
+    faults.push({
+      code: "report/no-rows",
+      path: ["temperatures"],
+      message: `a table needs at least one temperature, got ${describeReceived(given)}`,
+      expected: "at least one temperature",
+    });
+  }
+  const temperaturesK = given?.map((value, index) =>
+    checkPositiveQuantity(value, "temperature", ["temperatures", index], faults),
+  );
+  const policy =
+    outsideRange === undefined ? undefined : checkOption(outsideRange, ["outsideRange"], faults, rangePolicies);
+  failIfAny(faults);
+  return { temperaturesK: temperaturesK as number[], outsideRange: policy };
 }
 
 /**

@@ -31,7 +31,9 @@ export function oneLine(text: string): string {
 export function wrap(text: string, width: number = reportWidth, indent: string = ""): string[] {
   const lines: string[] = [];
   let line = "";
-  for (const word of oneLine(text).split(" ").flatMap((piece) => pieces(piece, width - indent.length))) {
+  for (const word of oneLine(text)
+    .split(" ")
+    .flatMap((piece) => pieces(piece, width - indent.length))) {
     const longer = line === "" ? word : `${line} ${word}`;
     if (longer.length <= width - (lines.length === 0 ? 0 : indent.length)) {
       line = longer;

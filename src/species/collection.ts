@@ -3,8 +3,8 @@ import { frozenCopy } from "../errors/frozen-copy.js";
 import { failIfAny, isGibbsLedgerError } from "../errors/gibbs-ledger-error.js";
 import { checkArray, checkObject, checkText } from "../errors/input.js";
 import { nearest } from "../errors/nearest.js";
-import { hillFormula } from "../formula/hill-formula.js";
 import { formula as readFormula } from "../formula/formula.js";
+import { hillFormula } from "../formula/hill-formula.js";
 import { parseLabel } from "../formula/parse-label.js";
 import { checkProvenance } from "../references/check-source.js";
 import { collectHouseRecord, houseRecord } from "./house-record.js";
@@ -183,7 +183,8 @@ function entriesNamed(index: CollectionIndex, key: string): readonly Entry[] {
   if (parts === undefined) return [];
   const spelled = index.byLabel.get(parts.label);
   if (spelled !== undefined) return [spelled];
-  const same = bySubstance.get(formulaKey(parts.formula, parts.chargeNumber)) ?? bySubstance.get(parts.composition) ?? [];
+  const same =
+    bySubstance.get(formulaKey(parts.formula, parts.chargeNumber)) ?? bySubstance.get(parts.composition) ?? [];
   return same.filter(({ record }) => agrees(record, parts));
 }
 

@@ -1,3 +1,4 @@
+import { gasConstantJPerMolK, referenceTemperatureK, standardPressurePa } from "../constants/constants.js";
 import type { PiecewiseSeries } from "../heat-capacity/exact-series.js";
 import type { SeriesPlan } from "../heat-capacity/merge.js";
 import { type PlannedSeries, plannedSeries, planOfSeries } from "../heat-capacity/planned-series.js";
@@ -14,7 +15,6 @@ import { lnDecimal } from "../numeric/decimal-functions.js";
 import { divideDecimals } from "../numeric/divide-decimals.js";
 import { decimalOf, type ExactDecimal, multiplyDecimals } from "../numeric/exact-decimal.js";
 import { exactFigureInSi, figureInSi } from "../quantity/figure-value.js";
-import { gasConstantJPerMolK, referenceTemperatureK, standardPressurePa } from "../constants/constants.js";
 import type { SpeciesRecord } from "./record.js";
 
 const plannedRecords = new WeakMap<SpeciesRecord, PlannedSeries>();
@@ -44,7 +44,10 @@ export function exactSpeciesSeries(record: SpeciesRecord, digits: number): Piece
  * Undefined where nothing changes: at 1 bar, and for phases that are no gas, whose volume work between 1 atm and 1 bar
  * is below 0.1 J/mol.
  */
-export function standardPressureEntropy(record: SpeciesRecord, digits: number = defaultDigits): ExactDecimal | undefined {
+export function standardPressureEntropy(
+  record: SpeciesRecord,
+  digits: number = defaultDigits,
+): ExactDecimal | undefined {
   if (record.state !== "g") return undefined;
   const pressurePa = figureInSi(record.standardPressure);
   if (pressurePa === standardPressurePa) return undefined;

@@ -47,7 +47,7 @@ const noLabels: readonly Label[] = Object.freeze([]);
  */
 export function standardProperties(species: SpeciesRecord, conditions: StandardConditions): StandardProperties {
   const record = houseRecord(species, ["species"]);
-  const temperatureK = temperatureInKelvin(conditions?.temperature, "temperature");
+  const temperatureK = temperatureInKelvin(conditions?.temperature, ["temperature"]);
   const policy = rangePolicy(conditions.outsideRange);
   const plan = speciesPlan(record, policy);
   const index = intervalIndex(plan, temperatureK);

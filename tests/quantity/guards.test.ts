@@ -69,7 +69,7 @@ test.each([
   [null, "quantity/not-a-quantity"],
   [undefined, "quantity/not-a-quantity"],
 ])("the temperature %o is refused with %s", (value, code) => {
-  const [fault] = faultsOf(() => temperatureInKelvin(value, "conditions", "temperature"));
+  const [fault] = faultsOf(() => temperatureInKelvin(value, ["conditions", "temperature"]));
   expect(fault?.code).toBe(code);
   expect(fault?.path.slice(0, 2)).toEqual(["conditions", "temperature"]);
 });
@@ -83,7 +83,7 @@ test.each([
   [{ value: 1, unit: "psi" }, "quantity/unknown-unit"],
   [1e5, "quantity/not-a-quantity"],
 ])("the pressure %o is refused with %s", (value, code) => {
-  const [fault] = faultsOf(() => pressureInPascal(value, "pressure"));
+  const [fault] = faultsOf(() => pressureInPascal(value, ["pressure"]));
   expect(fault?.code).toBe(code);
   expect(fault?.path[0]).toBe("pressure");
 });
@@ -107,7 +107,7 @@ test("siValue takes any sign and every dimension", () => {
   }
   expect(
     isGibbsLedgerError(
-      caught(() => siValue({ value: 1, unit: "K" }, "pressure", 3)),
+      caught(() => siValue({ value: 1, unit: "K" }, "pressure", [3])),
       "quantity/wrong-dimension",
     ),
   ).toBe(true);

@@ -2,28 +2,57 @@ import { convert, quantity, standardReactionGibbsEnergy } from "gibbs-ledger";
 import { log } from "../../../dist/numeric/log.js";
 import { mergedCoefficients, temperaturesK, waterGasShift } from "../water-gas-shift.mjs";
 
-export const note = "standardReactionGibbsEnergy, four units mixed; reference: the same sum on kelvin doubles";
+export const note =
+  "standardReactionGibbsEnergy, four units mixed, results kept; reference: the same conversions and sum on raw doubles";
+
+const units = ["K", "Cel", "[degF]", "[degR]"];
 
 export function prepare() {
-  const units = ["K", "Cel", "[degF]", "[degR]"];
   const temperatures = temperaturesK.map((value, index) => convert(quantity(value, "K"), units[index % 4]));
-  const results = new Array(temperatures.length).fill(undefined);
-  const referenceResults = new Array(temperatures.length).fill(0);
+  const values = temperatures.map(({ value }) => value);
+  const scales = temperatures.map(({ unit }) => units.indexOf(unit));
   return {
     perCall: temperatures.length,
     subject() {
+      const results = new Array(temperatures.length);
       for (let index = 0; index < temperatures.length; index += 1) {
         results[index] = standardReactionGibbsEnergy(waterGasShift, { temperature: temperatures[index] });
       }
-      return results[3].value + results[998].value;
+      return results[3].value + results[198].value;
     },
     reference() {
-      for (let index = 0; index < temperaturesK.length; index += 1) {
-        referenceResults[index] = gibbsEnergy(temperaturesK[index]);
+      const results = new Array(temperatures.length);
+      for (let index = 0; index < values.length; index += 1) {
+        results[index] = gibbsEnergy(kelvinOf(values[index], scales[index]));
       }
-      return referenceResults[3] + referenceResults[998];
+      return results[3] + results[198];
     },
   };
+}
+
+/** Kelvin from a raw double on a scale by number, rounded as the library rounds it. */
+function kelvinOf(value, scale) {
+  switch (scale) {
+    case 0:
+      return value;
+    case 1: {
+      const sum = value + 273.15;
+      const back = sum - value;
+      return sum + (value - (sum - back) + (273.15 - back) + 2.2737367544323207e-14);
+    }
+    case 2:
+      return ninths(value, 459.67, -1.5916157281026244e-14);
+    default:
+      return ninths(value, 0, 0);
+  }
+}
+
+function ninths(value, zero, zeroLow) {
+  const sum = value + zero;
+  const back = sum - value;
+  const quotient = sum * (5 / 9);
+  const remainder = 4 * sum - 8 * quotient + (sum - quotient);
+  return quotient + (remainder + 5 * (value - (sum - back) + (zero - back) + zeroLow)) * (1 / 9);
 }
 
 const [below, above] = mergedCoefficients.map(([a1, a2, a3, a4, a5, a6, a7, a8, a9]) => ({
