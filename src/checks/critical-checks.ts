@@ -15,7 +15,7 @@ export function criticalCompressibility(record: SpeciesRecord, witness: Witness)
  * The acentric factor for which the vapour-pressure equation of Lee and Kesler passes through a measured point of the
  * saturation line, less the record's. `saturationTemperature` is at 1 atm unless `saturationPressure` is given.
  *
- * @see {@link references.lee1975}
+ * @see `references.lee1975`
  */
 export function acentricFactorFromBoilingPoint(record: SpeciesRecord, witness: Witness): number {
   const { temperature, pressure, acentricFactor } = criticalOf(record, witness);

@@ -36,7 +36,7 @@ interface Part {
  * @param temperatureK - above 0 K
  * @remarks Harmonic oscillators at the fundamentals give too low an entropy where vibrations are anharmonic: at
  * 1000 K by 0.2 J/mol/K for H2O, 0.3 for SO2, 0.7 for CH4 and 0.8 for NH3.
- * @see {@link references.mcquarrie2000}
+ * @see `references.mcquarrie2000`
  */
 export function molecularFunctions(constants: MolecularConstants, temperatureK: number): MolecularFunctions {
   const parts =

@@ -54,7 +54,7 @@ export interface CompiledReaction {
  * @throws GibbsLedgerError "reaction/no-common-range"; the functions throw "compiled/not-a-float-array",
  * "compiled/length-mismatch", "compiled/overlapping-arrays" and "heat-capacity/outside-range" with the index of the
  * first offending temperature, before anything is written
- * @remarks Arithmetic: the bits of {@link standardReactionProperties}, whatever the length or order of the array.
+ * @remarks Arithmetic: the bits of `standardReactionProperties`, whatever the length or order of the array.
  * @example
  * import { referenceData } from "gibbs-ledger/data";
  * const compiled = compileReaction(reaction("N2 + 3 H2 = 2 NH3", referenceData));

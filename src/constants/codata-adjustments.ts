@@ -10,7 +10,7 @@ export type FaradayConstantYear = Exclude<GasConstantYear, 1963>;
 /**
  * Molar gas constant by the year of the CODATA adjustment, for reading tables made with it. From 2018 on exact.
  *
- * @see {@link references.cohen1965} to {@link references.tiesinga2021}
+ * @see `references.cohen1965` to `references.tiesinga2021`
  * @example
  * gasConstantByAdjustment[1986].value; // => 8.31451
  */
@@ -30,7 +30,7 @@ export const gasConstantByAdjustment: Readonly<Record<GasConstantYear, Constant>
 /**
  * Faraday constant by the year of the CODATA adjustment, for reading tables made with it. From 2018 on exact.
  *
- * @see {@link references.cohen1973} to {@link references.tiesinga2021}
+ * @see `references.cohen1973` to `references.tiesinga2021`
  * @example
  * faradayConstantByAdjustment[1986].value; // => 96485.309
  */

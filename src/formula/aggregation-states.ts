@@ -2,7 +2,7 @@
  * Symbols for the state of aggregation, as the Green Book of IUPAC lists them: gas, liquid, solid, crystalline,
  * amorphous, aqueous solution, vitreous, liquid crystal, solution, adsorbed, monomeric, polymeric, fluid, condensed.
  *
- * @see {@link references.cohen2007}
+ * @see `references.cohen2007`
  */
 export const aggregationStates = [
   "g",

@@ -30,7 +30,7 @@ export const isotopeMassesSource: { readonly source: Citation; readonly origin: 
  * Masses of deuterium and tritium atoms in daltons, from the Atomic Mass Evaluation of 2020; these are the symbols D
  * and T of formulas.
  *
- * @see {@link references.wang2021}
+ * @see `references.wang2021`
  */
 export const isotopeMasses: Readonly<Record<HydrogenIsotope, AtomicWeight>> = {
   D: { value: 2.014101777844, uncertainty: 1.5e-11, printed: "2.014101777844(15)" },
@@ -137,7 +137,7 @@ export type WeighedElementSymbol = keyof typeof weights;
  *
  * The figures are from memory; a test holds them to the abridged table.
  *
- * @see {@link references.prohaska2022}
+ * @see `references.prohaska2022`
  * @example
  * atomicWeights.O.value; // => 15.999
  * atomicWeights.O.interval; // => [15.99903, 15.99977]

@@ -1,7 +1,7 @@
 /**
  * Symbols of the elements in the order of atomic number, hydrogen to oganesson.
  *
- * @see {@link references.cohen2007}
+ * @see `references.cohen2007`
  * @example
  * elementSymbols.length; // => 118
  * elementSymbols[25]; // => "Fe"

@@ -37,7 +37,7 @@ export interface Formula {
  * "formula/charge-order", "formula/ambiguous-dot", "formula/zero-count", "formula/count-out-of-range" (1e-6 to 1e12 atoms
  * of an element, 24 digits), "formula/empty", "formula/too-long", "formula/too-deep", "input/not-a-string"; the
  * message names the column, counted from 1
- * @see {@link references.cohen2007}
+ * @see `references.cohen2007`
  * @example
  * formula("CuSO4·5H2O").composition; // => { Cu: 1, H: 10, O: 9, S: 1 }
  * formula("SO₄²⁻").chargeNumber; // => -2

@@ -18,12 +18,12 @@ import { readGivenFormula } from "./formula-input.js";
  * not counted (0.00055 g/mol each); the electron itself has no atomic weight and is refused.
  *
  * The result is the double nearest to the exact sum of the printed values. Its uncertainty follows from those of
- * {@link atomicWeights} and from the material, and is not attached.
+ * `atomicWeights` and from the material, and is not attached.
  *
  * @param formula - a text, or what {@link formula} returned; of the latter the text is read again
  * @throws GibbsLedgerError "formula/no-atomic-weight" for elements without a standard atomic weight, and as
  * {@link formula}
- * @see {@link references.prohaska2022}
+ * @see `references.prohaska2022`
  * @example
  * const water = molarMass("H2O");
  * water.value; // => 18.015

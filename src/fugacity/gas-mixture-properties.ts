@@ -62,7 +62,7 @@ const sumTolerance = 1e-9;
  * "species/duplicate-label", those of quantities and records; "quantity/overflow" for a fugacity beyond a double;
  * and those of the equation of state
  * @remarks Arithmetic: that of the equation of state, and two roundings and an exponential in each fugacity.
- * @see {@link references.prausnitz1999}
+ * @see `references.prausnitz1999`
  * @example
  * const properties = gasMixtureProperties(virial(), {
  *   temperature: quantity(200, "K"),

@@ -19,7 +19,7 @@ import type { EquationOfState, GasComponent, GasMixture } from "./equation-of-st
  * @returns an equation of state
  * @throws GibbsLedgerError "input/not-an-object"; from `mixture` and `state`, the faults of the wrapped equation, with
  * the component's label in their path
- * @see {@link references.prausnitz1999}
+ * @see `references.prausnitz1999`
  * @example
  * const rule = lewisFugacityRule(virial());
  * rule.name; // => "lewisFugacityRule"

@@ -23,7 +23,7 @@ export interface PairConstants {
  * Zc = 0.291 - 0.080 omega; where it is known, Zc = pc Vc/(R Tc).
  *
  * @returns undefined where the acentric factor is unknown
- * @see {@link references.pitzer1957}
+ * @see `references.pitzer1957`
  */
 export function completeConstants(critical: CriticalConstants | undefined): CompleteConstants | undefined {
   if (critical?.acentricFactor === undefined) return undefined;
@@ -39,7 +39,7 @@ export function completeConstants(critical: CriticalConstants | undefined): Comp
  * Prausnitz's combining rules: Tc = sqrt(Tci Tcj) (1 - kij), Vc = ((Vci^(1/3) + Vcj^(1/3))/2)^3, Zc and omega the
  * means, pc = Zc R Tc/Vc. The same bits in either order of the two.
  *
- * @see {@link references.prausnitz1999}
+ * @see `references.prausnitz1999`
  */
 export function pairConstants(
   first: CompleteConstants,

@@ -26,7 +26,7 @@ export interface ReducedValue {
  * - Tsonopoulos: f0 as above - 0.000607/Tr^8, f1 = 0.0637 + 0.331/Tr^2 - 0.423/Tr^3 - 0.008/Tr^8, f2 = a/Tr^6 - b/Tr^8
  * - Abbott: f0 = 0.083 - 0.422/Tr^1.6, f1 = 0.139 - 0.172/Tr^4.2
  *
- * @see {@link references.pitzer1957} {@link references.tsonopoulos1974} {@link references.smith2001}
+ * @see `references.pitzer1957` `references.tsonopoulos1974` `references.smith2001`
  */
 export function reducedCoefficient(
   correlation: VirialCorrelation,

@@ -24,7 +24,7 @@ import { checkVirialOptions, type VirialOptions } from "./virial-options.js";
  * @remarks Arithmetic: within 4 eps of the sum of the absolute terms, 2,000 random cases a correlation against
  * 30-digit decimals. Against measured coefficients the correlation for nonpolar gases is mostly within 3 cm3/mol or
  * 5 %.
- * @see {@link references.tsonopoulos1974} {@link references.pitzer1957} {@link references.smith2001}
+ * @see `references.tsonopoulos1974` `references.pitzer1957` `references.smith2001`
  * @example
  * const coefficient = secondVirialCoefficient(CO2_g, quantity(300, "K"));
  * convert(coefficient, "cm3/mol").value; // => -121.9...

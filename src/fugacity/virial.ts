@@ -42,8 +42,8 @@ import { checkVirialOptions, type VirialOptions, type VirialSettings } from "./v
  * @remarks Arithmetic: a pure B within 4 eps of the sum of its absolute terms and T dB/dT within 6 eps, 2,000 random
  * cases a correlation against 30-digit decimals (worst seen 2.7 and 4.3). Sums over components are correctly rounded,
  * so that their order does not matter to the bit.
- * @see {@link references.tsonopoulos1974} {@link references.pitzer1957} {@link references.smith2001}
- * {@link references.prausnitz1999}
+ * @see `references.tsonopoulos1974` `references.pitzer1957` `references.smith2001`
+ * `references.prausnitz1999`
  * @example
  * const nitrogen = { label: "N2(g)", critical: { temperatureK: 126.2, pressurePa: 3398000, acentricFactor: 0.037 } };
  * const state = virial({ correlation: "abbott" }).mixture([nitrogen]).state(300, 1e6, [1]);

@@ -46,7 +46,7 @@ const readOnce = new WeakMap<object, PlannedSeries>();
  * @throws GibbsLedgerError "heat-capacity/outside-range", "heat-capacity/intervals",
  * "heat-capacity/coefficient-count", "heat-capacity/unknown-form", "heat-capacity/no-anchor", all faults at once
  * @remarks Arithmetic: within the bounds that are returned, 4 eps times the sum of the absolute terms.
- * @see {@link references.mcbride2002} {@link references.chase1998}
+ * @see `references.mcbride2002` `references.chase1998`
  * @example
  * const properties = seriesProperties(
  *   {

@@ -181,7 +181,7 @@ function kelvinOfNinths(value: number, isFahrenheit: boolean): number {
   const zero = isFahrenheit ? 459.67 : 0;
   const sum = value + zero;
   const back = sum - value;
-  const rest = value - (sum - back) + (zero - back) + (isFahrenheit ? -1.5916157281026244e-14 : 0);
+  const rest = value - (sum - back) + (zero - back) + (isFahrenheit ? -1.5916157281026246e-14 : 0);
   const quotient = sum * (5 / 9);
   return quotient + (4 * sum - 8 * quotient + (sum - quotient) + 5 * rest) * (1 / 9);
 }

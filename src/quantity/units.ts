@@ -11,7 +11,7 @@ export interface UnitEntry {
  * The one table of units: UCUM code (case sensitive) to its dimension and to its exact relation to the coherent SI
  * unit, SI = (value + offset) * factor.
  *
- * @see {@link references.bipm2019} {@link references.schadow2017}
+ * @see `references.bipm2019` `references.schadow2017`
  * @example
  * unitTable.atm.factor; // => "101325"
  */
@@ -99,16 +99,23 @@ export type UnitOf<D extends Dimension> = UnitsByDimension[D];
 export type DimensionOf<U extends UnitCode> = (typeof unitTable)[U]["dimension"];
 
 /**
- * Tells whether a text is a unit code, of one dimension where that is given: for units that come from configuration.
+ * Tells whether a text is a unit code: for units that come from configuration.
  *
  * @param text - anything; own codes of the table only, case sensitive
- * @param dimension - the dimension that the unit must have; absent: any
  * @example
  * isUnitCode("kJ/mol"); // => true
- * isUnitCode("kJ/mol", "pressure"); // => false
  * isUnitCode("degC"); // => false
  */
 export function isUnitCode(text: unknown): text is UnitCode;
+/**
+ * Tells whether a text is a unit code of one dimension.
+ *
+ * @param text - anything; own codes of the table only, case sensitive
+ * @param dimension - the dimension that the unit must have
+ * @example
+ * isUnitCode("kJ/mol", "molarEnergy"); // => true
+ * isUnitCode("kJ/mol", "pressure"); // => false
+ */
 export function isUnitCode<D extends Dimension>(text: unknown, dimension: D): text is UnitOf<D>;
 export function isUnitCode(text: unknown, dimension?: Dimension): boolean {
   const entry = entries.get(text);

@@ -64,7 +64,7 @@ const adopted = new WeakMap<object, HouseReaction>();
  * Reads a chemical equation against a collection and checks that it balances, elements and charge, exactly.
  *
  * Sides are joined by `=`, `->`, `<=>` or a Unicode arrow; coefficients are whole, decimal or fractional. A species may
- * be named by anything that {@link findSpecies} resolves. A species that stands twice, or on both sides, is combined,
+ * be named by anything that `findSpecies` resolves. A species that stands twice, or on both sides, is combined,
  * and the notes say so. Energies of the reaction are per mole of reaction as written.
  *
  * @param equation - at most 4,000 characters and 200 species

@@ -61,7 +61,7 @@ const smallestLnK = -708.3964185322641;
  * @throws GibbsLedgerError "species/outside-range" (one fault a species), "quantity/wrong-dimension",
  * "quantity/not-positive"
  * @remarks Arithmetic: within 4 eps of the sum of the absolute terms of the merged series.
- * @see {@link references.cohen2007}
+ * @see `references.cohen2007`
  * @example
  * import { referenceData } from "gibbs-ledger/data";
  * const synthesis = reaction("N2 + 3 H2 = 2 NH3", referenceData);

@@ -23,7 +23,6 @@ import {
 import { formatLedger, formatReactionTable } from "../../src/report/index.js";
 import { findSpecies, speciesCollection, speciesGrade, standardProperties } from "../../src/species/index.js";
 import { faultsOf } from "../errors/faults-of.js";
-import { figure } from "../heat-capacity/random-series.js";
 import { collectionOf, polynomialRecord } from "../species/records.js";
 
 /** Anything, as plain JavaScript may pass it. */

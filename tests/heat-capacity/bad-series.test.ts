@@ -26,7 +26,14 @@ test("the two good fits are read", () => {
   expect(() => properties(plain)).not.toThrow();
 });
 
-const [hole] = [[2.5, , 0, 0, 0, 0, 0]];
+/** An array without what stands at one place. */
+function withHole<T>(entries: readonly T[], place: number): T[] {
+  const copy = [...entries];
+  delete copy[place];
+  return copy;
+}
+const coefficientsWithHole = withHole(interval.coefficients, 1);
+const intervalsWithHole = withHole([interval, interval], 0);
 
 describe("a wrong fit is refused", () => {
   test.each<[string, unknown, string]>([
@@ -45,10 +52,14 @@ describe("a wrong fit is refused", () => {
     ["no intervals", { ...good, intervals: [] }, "heat-capacity/intervals at series.intervals"],
     ["intervals that are no array", { ...good, intervals: {} }, "input/not-an-array at series.intervals"],
     ["too many intervals", { ...good, intervals: Array(101).fill(interval) }, "input/too-large at series.intervals"],
-    ["a hole among the intervals", { ...good, intervals: [, interval] }, "input/not-an-object at series.intervals.0"],
+    [
+      "a hole among the intervals",
+      { ...good, intervals: intervalsWithHole },
+      "input/not-an-object at series.intervals.0",
+    ],
     [
       "a hole among the coefficients",
-      { ...good, intervals: [{ ...interval, coefficients: hole }] },
+      { ...good, intervals: [{ ...interval, coefficients: coefficientsWithHole }] },
       "input/not-finite at series.intervals.0.coefficients.1",
     ],
     [

@@ -42,7 +42,7 @@ test("random reactions agree with the oracle at 25 to 35 digits, and the error o
       expectSame(precise.lnK.digits, lnK, count);
       expectSame(precise.log10K.digits, lnK.div(Decimal.ln(10)), count);
     }),
-    { seed: 20261201, numRuns: 100 },
+    { seed: 20261201, numRuns: 50 },
   );
 });
 
@@ -51,14 +51,14 @@ describe("at 60 digits", () => {
 
   test("a seven-coefficient pair, worked by hand in 100 digits", () => {
     // W(g) = W(l) with Cp/R of 5/2 and 3 + 1e-3 T
-    const fit = (coefficients: number[]) =>
+    const fitOf = (coefficients: number[]) =>
       ({
         kind: "series",
         form: "seven-coefficient",
         gasConstant: 8.31451,
         intervals: [{ from: 200, to: 3000, coefficients, endsAt: "fit" }],
       }) as const;
-    const [gas, liquid] = [fit([2.5, 0, 0, 0, 0, -745.375, 4.37967491]), fit([3, 1e-3, 0, 0, 0, -800.25, 1.125])];
+    const [gas, liquid] = [fitOf([2.5, 0, 0, 0, 0, -745.375, 4.37967491]), fitOf([3, 1e-3, 0, 0, 0, -800.25, 1.125])];
     const terms: RandomTerm[] = [
       { label: "W(g)", numerator: -1, denominator: 1, series: gas },
       { label: "W(l)", numerator: 1, denominator: 1, series: liquid },
@@ -116,12 +116,12 @@ describe("sums that cancel", () => {
   });
 
   test("all but to zero keep their digits", () => {
-    const fit = (constant: number) =>
+    const phaseWith = (constant: number) =>
       recordOf(`C2(${constant === 0 ? "g" : "l"})`, {
         formationEnthalpy: figure(1e6 + constant, "J/mol"),
         standardEntropy: figure(100, "J/mol/K"),
       });
-    const subject = reaction("1/3 C2(g) = 1/3 C2(l)", collectionOf(fit(0), fit(1e-9)));
+    const subject = reaction("1/3 C2(g) = 1/3 C2(l)", collectionOf(phaseWith(0), phaseWith(1e-9)));
     const precise = evaluateToDigits(subject, { ...kelvin(298.15), digits: 15 });
     // The double 1e6 + 1e-9 is printed 1000000.000000001.
     expect(precise.enthalpy.digits).toBe("3.33333333333333e-10");

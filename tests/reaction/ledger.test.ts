@@ -16,7 +16,7 @@ const account = ledger(synthesis, { ...state, gas: { moleFractions }, inerts: [A
 
 const namesOf = ({ entries }: Ledger, label: string): LedgerEntryName[] =>
   entries.filter((entry) => entry.label === label).map(({ entry }) => entry);
-const valueOf = ({ entries }: Ledger, label: string, name: LedgerEntryName): number =>
+const amountOf = ({ entries }: Ledger, label: string, name: LedgerEntryName): number =>
   entries.find((entry) => entry.label === label && entry.entry === name)?.value.value ?? Number.NaN;
 
 describe("the entries", () => {
@@ -39,10 +39,10 @@ describe("the entries", () => {
 
   test("are what they say", () => {
     const thermal = 2 * gasConstantJPerMolK * 700.15;
-    expect(valueOf(account, "NH3(g)", "formation enthalpy")).toBeCloseTo(2 * -45940, -1);
-    expect(valueOf(account, "NH3(g)", "reference entropy")).toBeCloseTo(-2 * 700.15 * 192.77, -1);
-    expect(valueOf(account, "NH3(g)", "pressure")).toBeCloseTo(thermal * Math.log(50), 8);
-    expect(valueOf(account, "NH3(g)", "composition")).toBeCloseTo(thermal * Math.log(0.1), 8);
+    expect(amountOf(account, "NH3(g)", "formation enthalpy")).toBeCloseTo(2 * -45940, -1);
+    expect(amountOf(account, "NH3(g)", "reference entropy")).toBeCloseTo(-2 * 700.15 * 192.77, -1);
+    expect(amountOf(account, "NH3(g)", "pressure")).toBeCloseTo(thermal * Math.log(50), 8);
+    expect(amountOf(account, "NH3(g)", "composition")).toBeCloseTo(thermal * Math.log(0.1), 8);
   });
 
   test("sum to subtotals, the total and the direct route", () => {
@@ -104,7 +104,7 @@ describe("conditions", () => {
     labels.forEach((label, index) => {
       const coefficient = real.entries.find((entry) => entry.label === label)?.coefficient ?? Number.NaN;
       const thermal = coefficient * gasConstantJPerMolK * 700.15;
-      expect(valueOf(real, label, "non-ideality")).toBeCloseTo(thermal * lnFugacityCoefficients[index]!, 10);
+      expect(amountOf(real, label, "non-ideality")).toBeCloseTo(thermal * lnFugacityCoefficients[index]!, 10);
     });
     expect(real.equationOfState).toBe("virial");
     expect(real.uncertaintyIsLowerBound).toBe(true);
@@ -136,9 +136,9 @@ describe("conditions", () => {
   test("activities", () => {
     const given = ledger(synthesis, { ...state, activities: { "N2(g)": 1, "H2(g)": 2, "NH3(g)": 3 } });
     expect(namesOf(given, "H2(g)").at(-1)).toBe("activity");
-    expect(valueOf(given, "H2(g)", "activity")).toBeCloseTo(-3 * gasConstantJPerMolK * 700.15 * Math.log(2), 9);
+    expect(amountOf(given, "H2(g)", "activity")).toBeCloseTo(-3 * gasConstantJPerMolK * 700.15 * Math.log(2), 9);
     expect(given).not.toHaveProperty("equationOfState");
-    expect(valueOf(given, "N2(g)", "activity")).toBe(0);
+    expect(amountOf(given, "N2(g)", "activity")).toBe(0);
   });
 
   test("the change of the standard pressure has an entry of its own", () => {
@@ -149,10 +149,10 @@ describe("conditions", () => {
       pressure: { value: 1, unit: "atm" },
       gas: { moleFractions: { "He(g)": 1 } },
     });
-    expect(valueOf(one, "He(g)", "standard pressure")).toBeCloseTo(500 * gasConstantJPerMolK * Math.log(1.01325), 9);
+    expect(amountOf(one, "He(g)", "standard pressure")).toBeCloseTo(500 * gasConstantJPerMolK * Math.log(1.01325), 9);
     // At 1 atm the two entries of pressure cancel.
-    expect(valueOf(one, "He(g)", "standard pressure") + valueOf(one, "He(g)", "pressure")).toBeCloseTo(0, 9);
-    expect(valueOf(one, "He(g)", "reference entropy")).toBeCloseTo(500 * 126, 9);
+    expect(amountOf(one, "He(g)", "standard pressure") + amountOf(one, "He(g)", "pressure")).toBeCloseTo(0, 9);
+    expect(amountOf(one, "He(g)", "reference entropy")).toBeCloseTo(500 * 126, 9);
     expect(one.total.value).toBeCloseTo(one.directGibbsEnergy.value, 8);
   });
 });
@@ -190,7 +190,7 @@ describe("phases and their ranges", () => {
     const entry = above.entries.find((each) => each.entry === "transition");
     expect(entry).toMatchObject({ group: "temperature", label: "Fe(cr)", note: "at 1000 K" });
     expect(entry?.value.value).toBeCloseTo(-(900 - 1200 * 0.9), 8);
-    expect(valueOf(above, "Fe(cr)", "sensible heat")).toBeCloseTo(-(25 * 701.85 + 35 * 200), 8);
+    expect(amountOf(above, "Fe(cr)", "sensible heat")).toBeCloseTo(-(25 * 701.85 + 35 * 200), 8);
     expect(above.total.value).toBeCloseTo(above.directGibbsEnergy.value, 8);
   });
 

@@ -30,7 +30,7 @@ describe("standard properties are within 4 eps of the sum of the absolute terms"
       fc.property(randomTerms, temperaturesK, (terms, temperatureK) => {
         expect(worstShare(reactionOf(terms), exactValues(terms, temperatureK), temperatureK)).toBeLessThanOrEqual(1);
       }),
-      { seed: 20261201, numRuns: 400 },
+      { seed: 20261201, numRuns: 200 },
     );
   });
 
@@ -59,7 +59,7 @@ describe("standard properties are within 4 eps of the sum of the absolute terms"
           1,
         );
       }),
-      { seed: 20261202, numRuns: 300 },
+      { seed: 20261202, numRuns: 150 },
     );
   });
 
@@ -81,7 +81,7 @@ describe("standard properties are within 4 eps of the sum of the absolute terms"
           expect(Math.abs(precise[name]!.errorOfDouble)).toBeLessThanOrEqual(bound);
         }
       }),
-      { seed: 20261203, numRuns: 300 },
+      { seed: 20261203, numRuns: 150 },
     );
   });
 });

@@ -35,10 +35,9 @@ function changeWith(coefficients: readonly number[]): Reaction {
 
 /** Coefficients of factor (T - r1)(T - r2)... */
 function withRoots(factor: number, ...roots: number[]): number[] {
-  return roots.reduce(
-    (terms, root) => [0, ...terms].map((value, index) => value - root * (terms[index] ?? 0)),
-    [factor],
-  );
+  let terms = [factor];
+  for (const root of roots) terms = [0, ...terms].map((value, index) => value - root * (terms[index] ?? 0));
+  return terms;
 }
 
 describe("roots of known Gibbs energies", () => {

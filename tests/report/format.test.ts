@@ -79,7 +79,7 @@ describe("a ledger", () => {
         expectReport(text);
         expect(text.match(/^(formation|temperature|conditions|total) +sum /gm)).toHaveLength(4);
       }),
-      { seed: 20261201, numRuns: 200 },
+      { seed: 20261201, numRuns: 100 },
     );
   });
 

@@ -41,7 +41,7 @@ function kelvinOf(value, scale) {
       return sum + (value - (sum - back) + (273.15 - back) + 2.2737367544323207e-14);
     }
     case 2:
-      return ninths(value, 459.67, -1.5916157281026244e-14);
+      return ninths(value, 459.67, -1.5916157281026246e-14);
     default:
       return ninths(value, 0, 0);
   }
