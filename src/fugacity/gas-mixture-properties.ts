@@ -1,13 +1,13 @@
-import { describeReceived, type Fault, type FaultPath } from "../errors/fault.js";
+import type { Fault, FaultPath } from "../errors/fault.js";
 import { fail, failIfAny } from "../errors/gibbs-ledger-error.js";
 import { checkArray, checkObject } from "../errors/input.js";
-import { exactSum } from "../numeric/compensated.js";
 import { exp } from "../numeric/exp.js";
 import { checkPositiveQuantity } from "../quantity/guards.js";
 import type { Pressure, Quantity, Temperature } from "../quantity/quantity.js";
 import { collectHouseRecord } from "../species/house-record.js";
 import type { Label, SpeciesRecord } from "../species/record.js";
 import { checkEquationOfState } from "./check-equation-of-state.js";
+import { checkFraction, checkFractionSum, unknownLabel } from "./check-fractions.js";
 import type { EquationOfState } from "./equation-of-state.js";
 import { gasComponentOf } from "./gas-component-of.js";
 
@@ -44,9 +44,6 @@ const conditionKeys = {
   optional: [],
 } as const;
 
-/** How far the sum of the mole fractions may be from 1. */
-const sumTolerance = 1e-9;
-
 /**
  * Properties of a gas mixture by an equation of state: compressibility factor, molar volume, fugacity coefficients,
  * fugacities f_i = y_i phi_i p, and departures of enthalpy, entropy and Gibbs energy from the ideal gas.
@@ -79,7 +76,7 @@ export function gasMixtureProperties(
 ): GasMixtureProperties {
   const faults: Fault[] = [];
   checkEquationOfState(equationOfState, ["equationOfState"], faults);
-  checkObject(conditions, ["conditions"], faults, conditionKeys);
+  checkObject(conditions, [], faults, conditionKeys);
   failIfAny(typeof conditions === "object" && conditions !== null ? [] : faults);
   const temperatureK = positive(conditions.temperature, "temperature", faults);
   const pressurePa = positive(conditions.pressure, "pressure", faults);
@@ -88,7 +85,7 @@ export function gasMixtureProperties(
   failIfAny(faults);
   const components = labels.map((label) => gasComponentOf(records.get(label)!));
   const fractions = labels.map((label) => conditions.moleFractions[label]!);
-  const mixture = equationOfState.mixture(components, ["conditions", "species"]);
+  const mixture = equationOfState.mixture(components, ["species"]);
   const state = mixture.state(temperatureK!, pressurePa!, fractions);
   const lnFugacityCoefficients: Record<Label, number> = {};
   const fugacities: Record<Label, Quantity<"pressure", "Pa">> = {};
@@ -114,13 +111,13 @@ export function gasMixtureProperties(
 
 /** A missing quantity is a fault of the object's keys already. */
 function positive(value: unknown, dimension: "temperature" | "pressure", faults: Fault[]): number | undefined {
-  return value === undefined ? undefined : checkPositiveQuantity(value, dimension, ["conditions", dimension], faults);
+  return value === undefined ? undefined : checkPositiveQuantity(value, dimension, [dimension], faults);
 }
 
 function checkSpecies(species: unknown, faults: Fault[]): ReadonlyMap<Label, SpeciesRecord> {
   const records = new Map<Label, SpeciesRecord>();
   if (species === undefined) return records;
-  const path: FaultPath = ["conditions", "species"];
+  const path: FaultPath = ["species"];
   checkArray(species, path, faults)?.forEach((given, index) => {
     const record = collectHouseRecord(given, [...path, index], faults);
     if (record === undefined) return;
@@ -144,15 +141,15 @@ function checkFractions(
   faults: Fault[],
 ): readonly Label[] {
   if (moleFractions === undefined) return [];
-  const path: FaultPath = ["conditions", "moleFractions"];
+  const path: FaultPath = ["moleFractions"];
   const given = checkObject(moleFractions, path, faults, { required: [], optional: "any" });
   if (given === undefined) return [];
   const entries = Object.entries(given);
   const fractions: number[] = [];
-  for (const [label, fraction] of entries) {
+  for (const [label, value] of entries) {
     checkLabel(label, records, [...path, label], faults);
-    if (typeof fraction === "number" && fraction >= 0 && fraction <= 1) fractions.push(fraction);
-    else faults.push(invalidFraction(label, fraction, [...path, label]));
+    const fraction = checkFraction(value, [...path, label], faults);
+    if (fraction !== undefined) fractions.push(fraction);
   }
   if (entries.length === 0) {
     faults.push({
@@ -161,15 +158,8 @@ function checkFractions(
       message: "no mole fraction is given",
       expected: "at least one label with its mole fraction",
     });
-  } else if (fractions.length === entries.length && Math.abs(exactSum([...fractions, -1])) > sumTolerance) {
-    faults.push({
-      code: "conditions/fractions-do-not-sum",
-      path,
-      message: `the mole fractions sum to ${exactSum(fractions)}, not to 1`,
-      received: String(exactSum(fractions)),
-      expected: `1 within ${sumTolerance}`,
-      hint: "divide each by the sum; nothing is renormalised silently",
-    });
+  } else if (fractions.length === entries.length) {
+    checkFractionSum(fractions, path, faults);
   }
   return entries.map(([label]) => label);
 }
@@ -178,30 +168,13 @@ function checkLabel(label: string, records: ReadonlyMap<Label, SpeciesRecord>, p
   const record = records.get(label);
   if (record?.state === "g") return;
   const gases = [...records.values()].filter(({ state }) => state === "g").map((each) => each.label);
-  const bare = record === undefined ? label : label.slice(0, label.indexOf("("));
-  const near = gases.find((candidate) => candidate.startsWith(`${bare}(`));
-  faults.push({
-    code: "conditions/unknown-label",
-    path,
-    message: record === undefined ? `${describeReceived(label)} is not among the species` : `${label} is not a gas`,
-    received: label,
-    expected: "the label of a gas among the species",
-    ...(near === undefined ? {} : { hint: `did you mean ${near}?` }),
-  });
-}
-
-function invalidFraction(label: string, fraction: unknown, path: FaultPath): Fault {
-  const received = describeReceived(fraction);
-  return {
-    code: "conditions/invalid-fraction",
-    path,
-    message: `the mole fraction of ${label} is ${received}`,
-    received,
-    expected: "a number from 0 to 1",
-    ...(typeof fraction === "number" && fraction > 1 && fraction <= 100
-      ? { hint: `${fraction / 100} for ${fraction} per cent` }
-      : {}),
-  };
+  if (record === undefined) faults.push(unknownLabel(label, path, gases, "the label of a gas among the species"));
+  else
+    faults.push({
+      ...unknownLabel(record.formula, path, gases, "a gas"),
+      message: `${label} is not a gas`,
+      received: label,
+    });
 }
 
 function fugacity(label: Label, fraction: number, lnPhi: number, pressurePa: number): number {
@@ -209,7 +182,7 @@ function fugacity(label: Label, fraction: number, lnPhi: number, pressurePa: num
   if (value < Number.POSITIVE_INFINITY) return value;
   return fail({
     code: "quantity/overflow",
-    path: ["conditions", "moleFractions", label],
+    path: ["moleFractions", label],
     message: `the fugacity of ${label} is too large for a double: its ln phi is ${lnPhi}`,
     received: String(lnPhi),
     expected: "a fugacity below 1.7976931348623157e+308 Pa",

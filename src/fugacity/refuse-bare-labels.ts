@@ -27,7 +27,7 @@ function report(option: string, given: ReadonlySet<string>, labels: readonly str
       message: `${bare} is no label of a component`,
       received: bare,
       expected: labels.join(", "),
-      hint: `did you mean ${label}?`,
+      hint: `did you mean "${label}"?`,
     });
   }
 }

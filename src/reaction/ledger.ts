@@ -10,12 +10,14 @@ import type { Source } from "../references/source.js";
 import { type SpeciesGrade, speciesGrade } from "../species/grade.js";
 import type { Label, SpeciesRecord } from "../species/record.js";
 import { speciesPlan, standardPressureEntropy } from "../species/species-function.js";
-import type { ReactionConditions, ReactionState, TermState } from "./conditions.js";
+import type { ReactionConditions } from "./conditions.js";
 import type { Reaction } from "./reaction.js";
 import { reactionPlans } from "./reaction.js";
 import { gibbsEnergyOf, lnQuotientOf, stateOfPresent } from "./reaction-gibbs-energy.js";
 import { labelsOutside } from "./reaction-plan.js";
+import type { ReactionState } from "./reaction-state.js";
 import type { StandardStates } from "./standard-state.js";
+import type { TermState } from "./term-state.js";
 
 /** What an entry of a ledger accounts for. */
 export type LedgerEntryName =

@@ -5,16 +5,12 @@ import { evaluateAt, intervalIndex, roundingBound } from "../heat-capacity/evalu
 import { exactDot } from "../numeric/compensated.js";
 import { log } from "../numeric/log.js";
 import type { Quantity } from "../quantity/quantity.js";
-import {
-  checkZeroActivities,
-  lnActivity,
-  type ReactionConditions,
-  type ReactionState,
-  reactionState,
-} from "./conditions.js";
+import type { ReactionConditions } from "./conditions.js";
 import type { Reaction } from "./reaction.js";
 import { reactionPlans } from "./reaction.js";
 import { failReactionRange, reactionPlan } from "./reaction-plan.js";
+import { type ReactionState, reactionState } from "./reaction-state.js";
+import { checkZeroActivities, lnActivity } from "./term-state.js";
 
 /** Which way a reaction runs at a composition, and why. */
 export interface ReactionDirection {
@@ -133,7 +129,7 @@ export function gibbsEnergyOf(reaction: Reaction, state: ReactionState): number 
 export function stateOfPresent(reaction: Reaction, conditions: ReactionConditions): ReactionState {
   const state = reactionState(reaction, conditions);
   const faults: Fault[] = [];
-  checkZeroActivities(state, faults);
+  checkZeroActivities(state.terms, faults);
   failIfAny(faults);
   return state;
 }

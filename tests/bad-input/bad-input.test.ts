@@ -260,14 +260,14 @@ const perCondition: Row[] = (
     name: `${name} with a bare key`,
     call: () => call({ ...state, gas: { moleFractions: { N2: 0.25, "H2(g)": 0.5, "NH3(g)": 0.25 } } }),
     code: "conditions/unknown-label",
-    path: "gas.N2",
+    path: "gas.moleFractions.N2",
     hint: 'did you mean "N2(g)"?',
   },
   {
     name: `${name} with a huge key`,
     call: () => call({ ...state, gas: { moleFractions: { ...fractions, [huge]: 0 } } }),
     code: "conditions/unknown-label",
-    path: `gas.${"x".repeat(79)}…`,
+    path: `gas.moleFractions.${"x".repeat(79)}…`,
   },
   {
     name: `${name} with a key of the prototype`,
@@ -302,7 +302,7 @@ const perCondition: Row[] = (
         inerts: [polynomialRecord("C2(g)", 0, 1, [1])],
       }),
     code: "fugacity/missing-critical-constants",
-    path: "gas.C2(g)",
+    path: "gas.moleFractions.C2(g)",
   },
 ]);
 

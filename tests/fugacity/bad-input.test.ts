@@ -138,8 +138,8 @@ describe("components", () => {
   test("parameters under a bare formula are refused with the label", () => {
     const equation = virial({ binaryInteraction: { N2: { "CH4(g)": 0.03 } }, polar: { N2: { a: 0, b: 0 } } });
     expect(faultsOf(() => equation.mixture([nitrogen]))).toEqual([
-      { code: "conditions/unknown-label", path: "options.binaryInteraction.N2", hint: "did you mean N2(g)?" },
-      { code: "conditions/unknown-label", path: "options.polar.N2", hint: "did you mean N2(g)?" },
+      { code: "conditions/unknown-label", path: "options.binaryInteraction.N2", hint: 'did you mean "N2(g)"?' },
+      { code: "conditions/unknown-label", path: "options.polar.N2", hint: 'did you mean "N2(g)"?' },
     ]);
   });
 });

@@ -136,9 +136,9 @@ describe("conditions that are wrong", () => {
       [
         "input/missing at temperature",
         "input/missing at pressure",
-        "conditions/missing-composition at gas.N2(g)",
-        "conditions/missing-composition at gas.H2(g)",
-        "conditions/missing-composition at gas.NH3(g)",
+        "conditions/missing-composition at gas.moleFractions.N2(g)",
+        "conditions/missing-composition at gas.moleFractions.H2(g)",
+        "conditions/missing-composition at gas.moleFractions.NH3(g)",
       ],
     ],
     ["a misspelt key", { ...conditions, presure: 1 }, ["input/unknown-key at presure"]],
@@ -190,10 +190,22 @@ describe("conditions that are wrong", () => {
       withGas({ ...moleFractions, "NH3(g)": Number.NaN }),
       ["conditions/invalid-fraction at gas.moleFractions.NH3(g)"],
     ],
-    ["a species left out", withGas({ "N2(g)": 0.4, "H2(g)": 0.6 }), ["conditions/missing-composition at gas.NH3(g)"]],
-    ["a bare label", withGas({ N2: 0.2, "H2(g)": 0.6, "NH3(g)": 0.2 }), ["conditions/unknown-label at gas.N2"]],
-    ["a stranger", withGas({ ...moleFractions, "Ar(g)": 0 }), ["conditions/unknown-label at gas.Ar(g)"]],
-    ["an inert without a fraction", { ...conditions, inerts: [Ar_g] }, ["conditions/missing-composition at gas.Ar(g)"]],
+    [
+      "a species left out",
+      withGas({ "N2(g)": 0.4, "H2(g)": 0.6 }),
+      ["conditions/missing-composition at gas.moleFractions.NH3(g)"],
+    ],
+    [
+      "a bare label",
+      withGas({ N2: 0.2, "H2(g)": 0.6, "NH3(g)": 0.2 }),
+      ["conditions/unknown-label at gas.moleFractions.N2"],
+    ],
+    ["a stranger", withGas({ ...moleFractions, "Ar(g)": 0 }), ["conditions/unknown-label at gas.moleFractions.Ar(g)"]],
+    [
+      "an inert without a fraction",
+      { ...conditions, inerts: [Ar_g] },
+      ["conditions/missing-composition at gas.moleFractions.Ar(g)"],
+    ],
     ["an inert that reacts", { ...conditions, inerts: [N2_g] }, ["conditions/duplicate-label at inerts.0"]],
     [
       "an inert twice",
@@ -203,7 +215,7 @@ describe("conditions that are wrong", () => {
     [
       "a solid inert",
       { ...conditions, inerts: [CaO_cr] },
-      ["conditions/unknown-label at inerts.0", "conditions/missing-composition at gas.CaO(cr)"],
+      ["conditions/unknown-label at inerts.0", "conditions/missing-composition at gas.moleFractions.CaO(cr)"],
     ],
     ["inerts by label", { ...conditions, inerts: ["Ar(g)"] }, ["input/not-an-object at inerts.0"]],
     [
@@ -264,7 +276,7 @@ describe("conditions that are wrong", () => {
     [
       "an absent reactant",
       withGas({ "N2(g)": 0, "H2(g)": 0.8, "NH3(g)": 0.2 }),
-      ["conditions/zero-activity at gas.N2(g)"],
+      ["conditions/zero-activity at gas.moleFractions.N2(g)"],
     ],
     [
       "an activity of zero",
@@ -276,7 +288,7 @@ describe("conditions that are wrong", () => {
       JSON.parse(
         '{ "temperature": { "value": 700, "unit": "K" }, "pressure": { "value": 1, "unit": "bar" }, "gas": { "moleFractions": { "N2(g)": 0.2, "H2(g)": 0.6, "NH3(g)": 0.2, "__proto__": 0 } } }',
       ),
-      ["input/forbidden-key at gas.moleFractions.__proto__", "conditions/unknown-label at gas.__proto__"],
+      ["input/forbidden-key at gas.moleFractions.__proto__", "conditions/unknown-label at gas.moleFractions.__proto__"],
     ],
   ])("%s", (_name, value, places) => {
     expect(placesOf(() => quotient(value)).toSorted()).toEqual(places.toSorted());
@@ -296,7 +308,7 @@ describe("conditions that are wrong", () => {
       "conditions/invalid-fraction at activities.NH3(g)",
       "conditions/invalid-fraction at gas.moleFractions.H2(g)",
       "conditions/invalid-fraction at gas.moleFractions.N2",
-      "conditions/missing-composition at gas.CO2(g)",
+      "conditions/missing-composition at gas.moleFractions.CO2(g)",
       "input/not-an-object at gas.equationOfState",
       "input/not-an-object at inerts.1",
       "input/unknown-key at extra",
@@ -311,7 +323,7 @@ describe("conditions that are wrong", () => {
     expect(hint(withGas({ N2: 0.2, "H2(g)": 0.6, "NH3(g)": 0.2 }))).toBe('did you mean "N2(g)"?');
     expect(hint(withGas({ "N2(g)": 20 }))).toBe("0.2 for 20 per cent");
     expect(hint(withGas({ ...moleFractions, "NH3(g)": 0.3 }))).toBe("list inert gases too; nothing is renormalised");
-    expect(hint({ ...state, gas: { moleFractions, equationOfState: virial } })).toBe("call it: virial()");
+    expect(hint({ ...state, gas: { moleFractions, equationOfState: virial } })).toBe("call it: virial(), not virial");
     expect(hint({ ...conditions, presure: 1 })).toBe("did you mean pressure?");
     expect(hint(withGas({ "N2(g)": 0.25, "H2(g)": 0.75, "NH3(g)": 0 }))).toContain("only run forward");
     expect(hint(withGas({ "N2(g)": 0, "H2(g)": 0.8, "NH3(g)": 0.2 }))).toContain("only run in reverse");

@@ -245,7 +245,7 @@ test("what is wrong is refused", () => {
         inerts: [Ar_g],
       }),
     ),
-  ).toEqual(["conditions/zero-activity at gas.NH3(g)"]);
+  ).toEqual(["conditions/zero-activity at gas.moleFractions.NH3(g)"]);
   expect(
     placesOf(() =>
       ledger(synthesis, {
