@@ -49,7 +49,7 @@ export interface CompiledReaction {
  * Compiles a reaction to functions over typed arrays: the series of its species are merged once, exactly, so that the
  * cost of a temperature does not grow with the number of species. Nothing is allocated per call.
  *
- * @param reaction - what {@link reaction} returned
+ * @param reaction - what `reaction` returned
  * @param options - the range policy
  * @throws GibbsLedgerError "reaction/no-common-range"; the functions throw "compiled/not-a-float-array",
  * "compiled/length-mismatch", "compiled/overlapping-arrays" and "heat-capacity/outside-range" with the index of the

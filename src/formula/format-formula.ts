@@ -16,8 +16,8 @@ export interface FormatFormulaOptions {
  * Writes a formula with its charge and state, in plain characters or with subscripts and superscripts. Both spellings
  * read back to the same composition.
  *
- * @param formula - a text, or what {@link formula} returned; of the latter the text is read again
- * @throws GibbsLedgerError "input/unknown-option", "input/unknown-key", and as {@link formula}
+ * @param formula - a text, or what `formula` returned; of the latter the text is read again
+ * @throws GibbsLedgerError "input/unknown-option", "input/unknown-key", and as `formula`
  * @example
  * formatFormula("SO4^2-(aq)", { style: "unicode" }); // => "SO₄²⁻(aq)"
  * formatFormula("Fe₂(SO₄)₃", { style: "ascii" }); // => "Fe2(SO4)3"

@@ -20,9 +20,9 @@ import { readGivenFormula } from "./formula-input.js";
  * The result is the double nearest to the exact sum of the printed values. Its uncertainty follows from those of
  * `atomicWeights` and from the material, and is not attached.
  *
- * @param formula - a text, or what {@link formula} returned; of the latter the text is read again
+ * @param formula - a text, or what `formula` returned; of the latter the text is read again
  * @throws GibbsLedgerError "formula/no-atomic-weight" for elements without a standard atomic weight, and as
- * {@link formula}
+ * `formula`
  * @see `references.prohaska2022`
  * @example
  * const water = molarMass("H2O");

@@ -22,8 +22,8 @@ export interface LabelParts {
  * before the sign, the state at the end. Groups stay as they are written. The `·` between parts is the only character
  * outside ASCII.
  *
- * @param text - a formula as {@link formula} reads it, with or without a state
- * @throws GibbsLedgerError as {@link formula}
+ * @param text - a formula as `formula` reads it, with or without a state
+ * @throws GibbsLedgerError as `formula`
  * @example
  * parseLabel("SO₄²⁻(aq)").label; // => "SO4^2-(aq)"
  * parseLabel("CuSO4.5H2O(cr)").label; // => "CuSO4·5H2O(cr)"

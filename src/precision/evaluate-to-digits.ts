@@ -67,7 +67,7 @@ const mostDigits = 200;
  *
  * A route of its own: species after species, term after term in decimal arithmetic, without the merged series.
  *
- * @param reaction - what {@link reaction} returned
+ * @param reaction - what `reaction` returned
  * @param conditions - temperature and number of digits
  * @throws GibbsLedgerError "precision/digits", "species/outside-range"
  * @example

@@ -91,7 +91,7 @@ const groups: readonly LedgerGroup[] = ["formation", "temperature", "conditions"
  * by its enthalpy of formation, reference entropy, sensible heat, heat-capacity entropy, standard pressure, pressure,
  * composition, non-ideality and volume, each with unit, source and uncertainty. The entries sum to the total.
  *
- * @param reaction - what {@link reaction} returned
+ * @param reaction - what `reaction` returned
  * @param conditions - temperature, pressure, the composition of the gas with its inerts, activities given by the caller
  * @returns plain data; {@link formatLedger} prints it
  * @throws GibbsLedgerError as {@link reactionGibbsEnergy}

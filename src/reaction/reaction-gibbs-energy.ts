@@ -31,7 +31,7 @@ export interface ReactionDirection {
  * The activity of a gas is y phi p / 1 bar, of a pure condensed phase exp(V (p - 1 bar) / RT), of any other species
  * what the caller gives.
  *
- * @param reaction - what {@link reaction} returned
+ * @param reaction - what `reaction` returned
  * @param conditions - temperature, pressure, the composition of the gas with its inerts, activities given by the caller
  * @returns a number of dimension one; at equilibrium it equals ln K
  * @throws GibbsLedgerError "conditions/zero-activity", "conditions/unknown-label",
@@ -54,7 +54,7 @@ export function lnReactionQuotient(reaction: Reaction, conditions: ReactionCondi
  * Gibbs energy of a reaction at its real temperature, pressure and composition, G = G(standard) + RT ln Q, per mole of
  * reaction as written.
  *
- * @param reaction - what {@link reaction} returned
+ * @param reaction - what `reaction` returned
  * @param conditions - temperature, pressure, the composition of the gas with its inerts, activities given by the caller
  * @returns a quantity in J/mol; negative where the reaction runs forward
  * @throws GibbsLedgerError as {@link lnReactionQuotient}, and "species/outside-range"
@@ -80,7 +80,7 @@ export function reactionGibbsEnergy(
  * Which way a reaction runs at a composition. Where a product is absent it can only run forward, where a reactant is
  * absent only in reverse, and no number is needed.
  *
- * @param reaction - what {@link reaction} returned
+ * @param reaction - what `reaction` returned
  * @param conditions - as of {@link reactionGibbsEnergy}; fractions and activities of reacting species may be zero
  * @throws GibbsLedgerError as {@link reactionGibbsEnergy}, but for "conditions/zero-activity"
  * @example

@@ -55,7 +55,7 @@ const smallestLnK = -708.3964185322641;
  * The series of all species are summed exactly and rounded once, when the reaction is first evaluated; the result does
  * not depend on the order of the species, and reverses its sign exactly with the equation.
  *
- * @param reaction - what {@link reaction} returned, here, in another copy of the package, or through JSON
+ * @param reaction - what `reaction` returned, here, in another copy of the package, or through JSON
  * @param conditions - temperature above 0 K, in any unit of temperature, within the range of every species
  * @returns a quantity in J/mol
  * @throws GibbsLedgerError "species/outside-range" (one fault a species), "quantity/wrong-dimension",
@@ -85,7 +85,7 @@ export function standardReactionGibbsEnergy(
  * Standard heat capacity, enthalpy, entropy and Gibbs energy of a reaction and the logarithms of its equilibrium
  * constant, with the standard states that the constant refers to.
  *
- * @param reaction - what {@link reaction} returned, here, in another copy of the package, or through JSON
+ * @param reaction - what `reaction` returned, here, in another copy of the package, or through JSON
  * @param conditions - temperature above 0 K, within the range of every species unless `outsideRange` says otherwise
  * @throws GibbsLedgerError as {@link standardReactionGibbsEnergy}
  * @remarks Arithmetic: each property within 4 eps of the sum of the absolute terms of its series.

@@ -35,7 +35,7 @@ const samplesPerInterval = 64;
  * Every interval of the series is sampled, each change of sign is solved to the last bits, and where the curve turns
  * towards the value between two samples its extremum is looked up, so that a pair of near roots is not missed.
  *
- * @param reaction - what {@link reaction} returned
+ * @param reaction - what `reaction` returned
  * @param search - between which temperatures, at which Gibbs energy, and at which pressure and composition
  * @returns temperatures in kelvin; an empty array where the value is not met
  * @throws GibbsLedgerError "roots/empty-range", "species/outside-range", and the faults of conditions

@@ -40,7 +40,7 @@ const units = ["K", "1", "1", "kJ/mol", "kJ/mol", "kJ/mol", "J/mol/K"];
  * A table of a reaction over temperature as text of 80 columns: T, log10 K with its standard uncertainty as far as the
  * data publish one, and the standard Gibbs energy with its parts, per mole of reaction as written.
  *
- * @param reaction - what {@link reaction} returned
+ * @param reaction - what `reaction` returned
  * @param options - the temperatures
  * @returns lines joined by line feeds, each at most 80 characters long
  * @throws GibbsLedgerError "report/no-rows", and as {@link standardReactionProperties}
