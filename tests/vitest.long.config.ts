@@ -7,6 +7,5 @@ export default defineConfig({
   test: {
     include: ["tests/**/*.long.ts"],
     testTimeout: 600_000,
-    passWithNoTests: true,
   },
 });

@@ -3,19 +3,8 @@ import { describe, expect, test } from "vitest";
 import { heatCapacityForms } from "../../src/heat-capacity/forms.js";
 import type { PublishedSeries } from "../../src/heat-capacity/published-series.js";
 import { seriesProperties } from "../../src/heat-capacity/series-properties.js";
-import { binary, Decimal, functionNames, valuesOf } from "./oracle.js";
 import { randomSeries, temperaturesK } from "./random-series.js";
-
-/** The worst error over the returned bound, which is 4 eps times the sum of the absolute terms. */
-function worstShare(series: PublishedSeries, temperatureK: number): number {
-  const properties = seriesProperties(series, { temperature: { value: temperatureK, unit: "K" } });
-  const exact = valuesOf(series, series.intervals[0]!, binary(temperatureK));
-  const shares = functionNames.map((name) => {
-    const error = binary(properties[name].value).minus(exact[name]).abs();
-    return error.isZero() ? 0 : error.div(properties.roundingBounds[name]).toNumber();
-  });
-  return Math.max(...shares);
-}
+import { cancelled, worstShare } from "./worst-share.js";
 
 describe("Cp, H, S and G are within 4 eps of the sum of their absolute terms", () => {
   for (const form of heatCapacityForms) {
@@ -38,22 +27,6 @@ describe("Cp, H, S and G are within 4 eps of the sum of their absolute terms", (
     });
   }
 });
-
-/** The same fit with H shifted so that G is zero to the digits of a double. */
-function cancelled(series: PublishedSeries, temperatureK: number): PublishedSeries {
-  const [interval] = series.intervals;
-  const { gibbsEnergy } = valuesOf(series, interval!, new Decimal(temperatureK));
-  if (series.anchor !== undefined) {
-    const { enthalpy } = series.anchor;
-    const value = new Decimal(enthalpy.value).minus(gibbsEnergy).toNumber();
-    return { ...series, anchor: { ...series.anchor, enthalpy: { ...enthalpy, value } } };
-  }
-  const place = interval!.coefficients.length - 2;
-  const unit = series.form === "shomate" ? 1000 : series.gasConstant!;
-  const constant = new Decimal(interval!.coefficients[place]!).minus(gibbsEnergy.div(unit)).toNumber();
-  const coefficients = interval!.coefficients.map((value, index) => (index === place ? constant : value));
-  return { ...series, intervals: [{ ...interval!, coefficients }] };
-}
 
 test("the returned bound is 4 eps times the sum of the absolute terms", () => {
   const series: PublishedSeries = {
