@@ -93,7 +93,7 @@ function arrayFunction(
       const temperatureK = temperaturesK[place]!;
       let index = 0;
       while (temperatureK > ends[index]!) index += 1;
-      const value = evaluateColumns(combinations[index]!, temperatureK, log(temperatureK)) + 0;
+      const value = evaluateColumns(combinations[index]!, temperatureK, log(temperatureK));
       out[place] = finish === undefined ? value : finish(value, temperatureK);
     }
     return out;

@@ -70,7 +70,7 @@ export function columns(coefficients: Readonly<Record<BasisName, number>>, extra
 }
 
 /**
- * Value of a linear combination of the basis at one temperature.
+ * Value of a linear combination of the basis at one temperature; never -0, since no coefficient is.
  *
  * @param c - the coefficients
  * @param temperatureK - above 0 K

@@ -33,7 +33,7 @@ export function evaluateAt(
   temperatureK: number,
   lnTemperature: number,
 ): number {
-  return evaluateColumns(plan.intervals[index]![name], temperatureK, lnTemperature) + 0;
+  return evaluateColumns(plan.intervals[index]![name], temperatureK, lnTemperature);
 }
 
 /** All four functions at a temperature within the range. */
@@ -41,10 +41,10 @@ export function evaluateAll(plan: SeriesPlan, index: number, temperatureK: numbe
   const interval = plan.intervals[index]!;
   const lnTemperature = log(temperatureK);
   return {
-    heatCapacity: evaluateColumns(interval.heatCapacity, temperatureK, lnTemperature) + 0,
-    enthalpy: evaluateColumns(interval.enthalpy, temperatureK, lnTemperature) + 0,
-    entropy: evaluateColumns(interval.entropy, temperatureK, lnTemperature) + 0,
-    gibbsEnergy: evaluateColumns(interval.gibbsEnergy, temperatureK, lnTemperature) + 0,
+    heatCapacity: evaluateColumns(interval.heatCapacity, temperatureK, lnTemperature),
+    enthalpy: evaluateColumns(interval.enthalpy, temperatureK, lnTemperature),
+    entropy: evaluateColumns(interval.entropy, temperatureK, lnTemperature),
+    gibbsEnergy: evaluateColumns(interval.gibbsEnergy, temperatureK, lnTemperature),
   };
 }
 

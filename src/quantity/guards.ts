@@ -29,13 +29,16 @@ const quantityKeys: readonly string[] = ["value", "unit", "standardUncertainty"]
  * temperatureInKelvin({ value: 25, unit: "Cel" }, ["temperature"]); // => 298.15
  */
 export function temperatureInKelvin(value: unknown, path?: FaultPath): number {
-  const { value: number, unit }: Reading = value ?? nothing;
+  const parts: Reading = value ?? nothing;
+  const number = parts.value;
+  const unit = parts.unit;
   // The limits of the short ways are explained below. All else, faults included, goes the slow way.
   if (typeof number === "number" && number < 1e15) {
     if (unit === "K" && number > 0) return number;
-    if (number > 1e-6 || (number < -1e-6 && number > -273)) {
+    if (number * number > 1e-12 && number > -273) {
       if (unit === "Cel") return kelvinOfCelsius(number);
-      if (unit === "[degF]" || (unit === "[degR]" && number > 0)) return kelvinOfNinths(number, unit === "[degF]");
+      const zero = unit === "[degF]" ? 459.67 : 0;
+      if (zero !== 0 || (unit === "[degR]" && number > 0)) return kelvinOfNinths(number, zero);
     }
   }
   return positive(value, number, unit, "temperature", path);
@@ -54,7 +57,9 @@ export function temperatureInKelvin(value: unknown, path?: FaultPath): number {
  * pressureInPascal({ value: 1, unit: "atm" }, ["pressure"]); // => 101325
  */
 export function pressureInPascal(value: unknown, path?: FaultPath): number {
-  const { value: number, unit }: Reading = value ?? nothing;
+  const parts: Reading = value ?? nothing;
+  const number = parts.value;
+  const unit = parts.unit;
   if (typeof number === "number" && number > 0 && number < 1e290) {
     // These factors are whole numbers, so one product is already the nearest double.
     switch (unit) {
@@ -162,8 +167,8 @@ export function notAQuantity(value: unknown, dimension: Dimension | undefined, p
  * The short ways to kelvin round right for 1e-6 < |value| < 1e15 and value > -273. Their errors of second order, some
  * 2^-100 of the value, are smaller than the distance of the exact result from the nearest midpoint between two
  * doubles: that is a multiple of the last place of the value divided by 180, and not zero, for 273.15 and 459.67 are no
- * binary fractions, and five ninths of a double are never a midpoint. The small numbers are what 273.15 and 459.67 have
- * beyond their nearest doubles.
+ * binary fractions, and five ninths of a double are never a midpoint. The small numbers are what 273.15 has beyond
+ * its nearest double, and what 459.67 has as a part of it.
  */
 
 /** value + 273.15, from the sum and its rounding error. */
@@ -177,11 +182,10 @@ function kelvinOfCelsius(value: number): number {
  * (value + zero) 5/9 with zero 459.67 or none: the sum, its rounding error, the nearest double to sum 5/9, and the
  * exact remainder 5 sum - 9 quotient.
  */
-function kelvinOfNinths(value: number, isFahrenheit: boolean): number {
-  const zero = isFahrenheit ? 459.67 : 0;
+function kelvinOfNinths(value: number, zero: number): number {
   const sum = value + zero;
   const back = sum - value;
-  const rest = value - (sum - back) + (zero - back) + (isFahrenheit ? -1.5916157281026246e-14 : 0);
+  const rest = value - (sum - back) + (zero - back) + zero * -3.4625181719551513e-17;
   const quotient = sum * (5 / 9);
   return quotient + (4 * sum - 8 * quotient + (sum - quotient) + 5 * rest) * (1 / 9);
 }

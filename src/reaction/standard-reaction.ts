@@ -77,8 +77,8 @@ export function standardReactionGibbsEnergy(
   const plan = reactionPlan(plans, conditions.outsideRange);
   const index = intervalIndex(plan, temperatureK);
   if (index < 0) return failReactionRange(reaction, temperatureK);
-  const { gibbsEnergy } = plan.intervals[index]!;
-  return { value: evaluateColumns(gibbsEnergy, temperatureK, log(temperatureK)) + 0, unit: "J/mol" };
+  const combination = plan.intervals[index]!.gibbsEnergy;
+  return { value: evaluateColumns(combination, temperatureK, log(temperatureK)), unit: "J/mol" };
 }
 
 /**
