@@ -28,23 +28,23 @@ const bedOutlet = {
 
 print("The ammonia cracker of the harbour ferry Tern (invented plant, real data)");
 
-print("1. The ledger: where the Gibbs energy at the bed outlet comes from\n");
+print("\n1. The ledger: where the Gibbs energy at the bed outlet comes from\n");
 print(formatLedger(ledger(cracking, bedOutlet)));
 
-print("2. The equilibrium constant over temperature\n");
+print("\n2. The equilibrium constant over temperature\n");
 const temperatures = [500, 550, 600, 650, 700, 750, 800].map((kelvin) => quantity(kelvin, "K"));
 print(formatReactionTable(cracking, { temperatures }));
 
-print("3. Which way, at the composition of the bed outlet\n");
+print("\n3. Which way, at the composition of the bed outlet\n");
 const { direction, reason } = reactionDirection(cracking, bedOutlet);
 print(`The reaction runs ${direction}: ${reason}.`);
 const real = reactionGibbsEnergy(cracking, bedOutlet);
 const ideal = reactionGibbsEnergy(cracking, { ...bedOutlet, gas: { moleFractions, equationOfState: idealGas() } });
-print(`as a real gas:  ${formatQuantity(real, { significantDigits: 5 })} (virial equation)`);
+print(`as a real gas:   ${formatQuantity(real, { significantDigits: 5 })} (virial equation)`);
 print(`as an ideal gas: ${formatQuantity(ideal, { significantDigits: 5 })}`);
 
 print("\n4. Where it turns\n");
-const between = [quantity(500, "K"), quantity(900, "K")];
+const between = [quantity(400, "K"), quantity(900, "K")];
 const { temperature: _held, ...conditions } = bedOutlet;
 const cases = [
   ["pure gases at 1 bar", { between }],
@@ -54,7 +54,7 @@ const cases = [
 for (const [name, search] of cases) {
   const turns = temperaturesAtGibbsEnergy(cracking, search);
   const found = turns.map((turn) => formatQuantity(turn, { digits: 2 }));
-  print(`${name}: ${found.length === 0 ? "nowhere between 500 K and 900 K" : found.join(", ")}`);
+  print(`${name}: ${found.length === 0 ? "nowhere between 400 K and 900 K" : found.join(", ")}`);
 }
 
 function print(text) {

@@ -2,7 +2,6 @@ import { gasConstantJPerMolK } from "../constants/constants.js";
 import type { FaultPath } from "../errors/fault.js";
 import { frozenCopy } from "../errors/frozen-copy.js";
 import { fail } from "../errors/gibbs-ledger-error.js";
-import { exactDot } from "../numeric/compensated.js";
 import { checkComponents } from "./check-components.js";
 import { checkState } from "./check-state.js";
 import { coefficientSource } from "./coefficient-source.js";
@@ -80,16 +79,23 @@ function virialMixture(settings: VirialSettings, components: readonly GasCompone
       : "lower the pressure; the function's B is in m3/mol: -388 cm3/mol is -388e-6";
   const count = labels.length;
   const sums = new Float64Array(count);
+  // Sums run in the order of the labels, so that the order in which a mixture is written does not show in a bit.
+  const order = labels.map((_, index) => index).sort((a, b) => (labels[a]! < labels[b]! ? -1 : 1));
+  const weighted = (moleFractions: ArrayLike<number>, values: ArrayLike<number>): number => {
+    let sum = 0;
+    for (const index of order) sum += moleFractions[index]! * values[index]!;
+    return sum;
+  };
   return {
     state(temperatureK, pressurePa, moleFractions) {
       checkState(temperatureK, pressurePa, moleFractions, count, path);
       const { values, slopes } = source(temperatureK);
       const thermal = gasConstantJPerMolK * temperatureK;
       const perVolume = pressurePa / thermal;
-      for (let index = 0; index < count; index += 1) sums[index] = exactDot(moleFractions, slopes[index]!);
-      const slope = exactDot(moleFractions, sums);
-      for (let index = 0; index < count; index += 1) sums[index] = exactDot(moleFractions, values[index]!);
-      const value = exactDot(moleFractions, sums);
+      for (let index = 0; index < count; index += 1) sums[index] = weighted(moleFractions, slopes[index]!);
+      const slope = weighted(moleFractions, sums);
+      for (let index = 0; index < count; index += 1) sums[index] = weighted(moleFractions, values[index]!);
+      const value = weighted(moleFractions, sums);
       const compressibilityFactor = 1 + value * perVolume;
       const molarVolume = thermal / pressurePa + value;
       // Adding 0 turns -0 into 0, which an underflowing product may be.
@@ -108,7 +114,7 @@ function virialMixture(settings: VirialSettings, components: readonly GasCompone
       const exceeded =
         criticalVolumes === undefined
           ? beyondSeries(value * perVolume, name)
-          : beyondDensity(molarVolume, 2 * exactDot(moleFractions, criticalVolumes), name);
+          : beyondDensity(molarVolume, 2 * weighted(moleFractions, criticalVolumes), name);
       if (exceeded !== undefined && settings.outsideValidity === "refuse") refuseOutside(exceeded, molarVolume, path);
       const lnFugacityCoefficients = new Array<number>(count);
       for (let index = 0; index < count; index += 1) {
