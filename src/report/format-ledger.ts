@@ -11,14 +11,8 @@ const entryWidth = 21;
 const energyWidth = 9;
 const uncertaintyWidth = 7;
 
-const columns: readonly TextColumn[] = [
-  { heading: "entry", width: entryWidth, align: "left" },
-  { heading: "species", width: 14, align: "left" },
-  { heading: "nu", width: 4, align: "right" },
-  { heading: "kJ/mol", width: energyWidth, align: "right" },
-  { heading: "u", width: uncertaintyWidth, align: "right" },
-  { heading: "source", width: 20, align: "left" },
-];
+/** Width that stoichiometric numbers and sources share: numbers are never cut, sources are. */
+const sharedWidth = 24;
 
 const groups: readonly LedgerGroup[] = ["formation", "temperature", "conditions"];
 
@@ -49,6 +43,7 @@ export function formatLedger(account: Ledger): string {
     ...account.entries.filter((entry) => entry.group === group).map(entryCells),
     sumCells(group, account.subtotals[group]),
   ]);
+  const columns = columnsOf(account);
   const [heading, line, ...rows] = layOut(columns, body);
   const total = { value: account.total, uncertaintyIsLowerBound: account.uncertaintyIsLowerBound };
   return [
@@ -68,6 +63,18 @@ export function formatLedger(account: Ledger): string {
     "",
     ...wrap(caution),
   ].join("\n");
+}
+
+function columnsOf({ entries }: Ledger): readonly TextColumn[] {
+  const coefficientWidth = Math.max(4, ...entries.map(({ coefficient }) => coefficientText(coefficient).length));
+  return [
+    { heading: "entry", width: entryWidth, align: "left" },
+    { heading: "species", width: 14, align: "left" },
+    { heading: "nu", width: coefficientWidth, align: "right" },
+    { heading: "kJ/mol", width: energyWidth, align: "right" },
+    { heading: "u", width: uncertaintyWidth, align: "right" },
+    { heading: "source", width: sharedWidth - coefficientWidth, align: "left" },
+  ];
 }
 
 function checkAccount(account: unknown): void {
@@ -107,10 +114,9 @@ function longNotes(account: Ledger): string[] {
     .map(({ entry, label, note }) => `${label}: ${entry} ${note}`);
 }
 
-/** Below 1 two decimals fit without the zero before the point; the equation above the table is exact. */
+/** Four digits; the equation above the table is exact. */
 function coefficientText(coefficient: number): string {
-  const text = String(Number(coefficient.toPrecision(4)));
-  return text.length <= 4 || Math.abs(coefficient) >= 0.995 ? text : coefficient.toFixed(2).replace("0.", ".");
+  return String(Number(coefficient.toPrecision(4)));
 }
 
 function sumCells(name: string, { value, uncertaintyIsLowerBound }: LedgerSum): string[] {

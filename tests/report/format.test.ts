@@ -104,8 +104,8 @@ describe("a ledger", () => {
     expect(text).toContain("and was combined");
     expect(text).toContain("has no molar volume");
     expect(text).toContain("C12H22O11(cr,…");
-    expect(text).toMatch(/^formation enthalpy +C12H22O11\(cr,… -\.58 /m);
-    expect(text).toMatch(/^formation enthalpy +C12H22O11\(aq\) +\.58 /m);
+    expect(text).toMatch(/^formation enthalpy +C12H22O11\(cr,… -0\.5833 /m);
+    expect(text).toMatch(/^formation enthalpy +C12H22O11\(aq\) +0\.5833 /m);
   });
 
   test("names the temperature of an anchor below the table where the row has no room for it", () => {
