@@ -1,4 +1,5 @@
-import { roundRatio } from "../numeric/exact-decimal.js";
+import { decimalOf, roundRatio } from "../numeric/exact-decimal.js";
+import { divideRationals, type Rational, rationalOfDecimal } from "../numeric/rational.js";
 import { type UnitCode, unitEntry } from "./units.js";
 
 /** How a value in one unit becomes a value in another: value * ratio + shift, as exact fractions and as doubles. */
@@ -120,11 +121,6 @@ function conversionOf(from: UnitCode, to: UnitCode): Conversion {
   return conversion;
 }
 
-interface Fraction {
-  readonly numerator: bigint;
-  readonly denominator: bigint;
-}
-
 /** From SI = (value + offset) * factor on both sides: ratio = factor / factor', shift = offset * ratio - offset'. */
 function prepare(from: UnitCode, to: UnitCode): Conversion {
   const source = unitEntry(from);
@@ -166,7 +162,7 @@ function twoDoubles(numerator: bigint, denominator: bigint): [high: number, low:
 }
 
 /** A finite double as an exact fraction whose denominator is a power of two. */
-function fractionOfDouble(value: number): Fraction {
+function fractionOfDouble(value: number): Rational {
   const bits = new DataView(new ArrayBuffer(8));
   bits.setFloat64(0, value);
   const word = bits.getBigUint64(0);
@@ -181,14 +177,8 @@ function fractionOfDouble(value: number): Fraction {
 }
 
 /** Reads "101325", "0.001" or "5/9" exactly; both sides of the stroke may be decimals. */
-function fractionOf(text: string): Fraction {
+function fractionOf(text: string): Rational {
   const [above, below] = text.split("/") as [string, string?];
-  const top = decimalOf(above);
-  const bottom = decimalOf(below ?? "1");
-  return { numerator: top.numerator * bottom.denominator, denominator: top.denominator * bottom.numerator };
-}
-
-function decimalOf(text: string): Fraction {
-  const [whole, digits = ""] = text.split(".") as [string, string?];
-  return { numerator: BigInt(whole + digits), denominator: 10n ** BigInt(digits.length) };
+  const top = rationalOfDecimal(decimalOf(above));
+  return below === undefined ? top : divideRationals(top, rationalOfDecimal(decimalOf(below)));
 }
