@@ -103,7 +103,7 @@ export function collectSpecies(
     });
     return undefined;
   }
-  const near = nearest(key, index.byLabel.keys());
+  const near = nearest(key, labelsAndNames(index));
   faults.push({
     code: "species/not-found",
     path,
@@ -113,6 +113,10 @@ export function collectSpecies(
     ...(near === undefined ? {} : { hint: `did you mean ${near}?` }),
   });
   return undefined;
+}
+
+function labelsAndNames(index: CollectionIndex): string[] {
+  return [...index.byLabel].flatMap(([label, { record }]) => [label, String(record.name)]);
 }
 
 /** The record of a label, as the house's copy; undefined where the collection has none. */

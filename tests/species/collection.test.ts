@@ -141,3 +141,9 @@ describe("a collection", () => {
     ]);
   });
 });
+
+test("a misspelt name gets the name as a hint", () => {
+  const [fault] = faultsOf(() => findSpecies(referenceData, "ammonai"));
+  expect(fault?.code).toBe("species/not-found");
+  expect(fault?.hint).toBe("did you mean ammonia?");
+});
