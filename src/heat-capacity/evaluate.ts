@@ -13,32 +13,16 @@ export interface SeriesValues {
   readonly gibbsEnergy: number;
 }
 
-/** Index of the interval that a temperature belongs to; -1 outside the range. */
-export function intervalIndex(plan: SeriesPlan, temperatureK: number): number {
-  if (!(temperatureK >= plan.fromK && temperatureK <= plan.toK)) return -1;
+/** The interval that a temperature belongs to; undefined outside the range, and for what is no temperature. */
+export function intervalOf(plan: SeriesPlan, temperatureK: number): IntervalColumns | undefined {
   let index = 0;
+  // Beyond the last end nothing is greater, and the interval is undefined.
   while (temperatureK > plan.endsK[index]!) index += 1;
-  return index;
+  return temperatureK >= plan.fromK ? plan.intervals[index] : undefined;
 }
 
-/**
- * One function of a merged series at a temperature within its range.
- *
- * @remarks Arithmetic: within 4 eps of the sum of the absolute terms; {@link roundingBound} gives that sum.
- */
-export function evaluateAt(
-  plan: SeriesPlan,
-  name: SeriesFunction,
-  index: number,
-  temperatureK: number,
-  lnTemperature: number,
-): number {
-  return evaluateColumns(plan.intervals[index]![name], temperatureK, lnTemperature);
-}
-
-/** All four functions at a temperature within the range. */
-export function evaluateAll(plan: SeriesPlan, index: number, temperatureK: number): SeriesValues {
-  const interval = plan.intervals[index]!;
+/** All four functions at a temperature of an interval. */
+export function evaluateAll(interval: IntervalColumns, temperatureK: number): SeriesValues {
   const lnTemperature = log(temperatureK);
   return {
     heatCapacity: evaluateColumns(interval.heatCapacity, temperatureK, lnTemperature),
@@ -51,6 +35,6 @@ export function evaluateAll(plan: SeriesPlan, index: number, temperatureK: numbe
 /**
  * Largest rounding error of an evaluation: 4 eps times the sum of the absolute terms, in the unit of the function.
  */
-export function roundingBound(plan: SeriesPlan, name: SeriesFunction, index: number, temperatureK: number): number {
-  return 4 * Number.EPSILON * absoluteTerms(plan.intervals[index]![name], temperatureK, log(temperatureK));
+export function roundingBound(interval: IntervalColumns, name: SeriesFunction, temperatureK: number): number {
+  return 4 * Number.EPSILON * absoluteTerms(interval[name], temperatureK, log(temperatureK));
 }

@@ -5,7 +5,7 @@ import { checkObject } from "../errors/input.js";
 import { temperatureInKelvin } from "../quantity/guards.js";
 import type { Quantity, Temperature } from "../quantity/quantity.js";
 import { checkSeries, seriesKeys } from "./check-series.js";
-import { evaluateAll, intervalIndex, roundingBound, type SeriesFunction } from "./evaluate.js";
+import { evaluateAll, intervalOf, roundingBound, type SeriesFunction } from "./evaluate.js";
 import { lowerEndK, type PiecewiseSeries, upperEndK } from "./exact-series.js";
 import { type PlannedSeries, plannedSeries, planOfSeries } from "./planned-series.js";
 import type { PublishedSeries } from "./published-series.js";
@@ -61,12 +61,12 @@ const readOnce = new WeakMap<object, PlannedSeries>();
  */
 export function seriesProperties(published: PublishedSeries, conditions: SeriesConditions): SeriesProperties {
   const read = readOf(published);
-  const temperatureK = temperatureInKelvin(conditions?.temperature, ["temperature"]);
+  const temperatureK = temperatureInKelvin(conditions?.temperature);
   const plan = planOfSeries(read, rangePolicy(conditions.outsideRange));
-  const index = intervalIndex(plan, temperatureK);
-  if (index < 0) return failOutside(read.series, temperatureK);
-  const values = evaluateAll(plan, index, temperatureK);
-  const bound = (name: SeriesFunction): number => roundingBound(plan, name, index, temperatureK);
+  const interval = intervalOf(plan, temperatureK);
+  if (interval === undefined) return failOutside(read.series, temperatureK);
+  const values = evaluateAll(interval, temperatureK);
+  const bound = (name: SeriesFunction): number => roundingBound(interval, name, temperatureK);
   return {
     heatCapacity: { value: values.heatCapacity, unit: "J/mol/K" },
     enthalpy: { value: values.enthalpy, unit: "J/mol" },

@@ -80,7 +80,7 @@ const mostDigits = 200;
 export function evaluateToDigits(reaction: Reaction, conditions: DigitsConditions): PreciseReactionProperties {
   const house = houseReaction(reaction);
   const digits = checkDigits(conditions);
-  const temperatureK = temperatureInKelvin(conditions.temperature, ["temperature"]);
+  const temperatureK = temperatureInKelvin(conditions.temperature);
   const doubles = standardReactionProperties(house, { temperature: { value: temperatureK, unit: "K" } });
   // Where the terms cancel further, the digits are not enough, and what more of them cancel too is zero.
   const first = sumToDigits(house, temperatureK, digits + guardDigits);

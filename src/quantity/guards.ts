@@ -21,12 +21,12 @@ const quantityKeys: readonly string[] = ["value", "unit", "standardUncertainty"]
  * one; reads `value` and `unit` once each and nothing else.
  *
  * @param value - a temperature above absolute zero
- * @param path - where the value lies in the caller's input
+ * @param path - where the value lies in the caller's input; absent: at `temperature`
  * @returns kelvin, above 0 and finite, the double nearest to the exact conversion
  * @throws GibbsLedgerError "quantity/not-a-quantity", "quantity/not-finite", "quantity/unknown-unit",
  * "quantity/wrong-dimension", "quantity/below-absolute-zero", "quantity/not-positive", "quantity/overflow"
  * @example
- * temperatureInKelvin({ value: 25, unit: "Cel" }, ["temperature"]); // => 298.15
+ * temperatureInKelvin({ value: 25, unit: "Cel" }); // => 298.15
  */
 export function temperatureInKelvin(value: unknown, path?: FaultPath): number {
   const parts: Reading = value ?? nothing;
@@ -49,12 +49,12 @@ export function temperatureInKelvin(value: unknown, path?: FaultPath): number {
  * and `unit` once each and nothing else.
  *
  * @param value - an absolute pressure above 0
- * @param path - where the value lies in the caller's input
+ * @param path - where the value lies in the caller's input; absent: at `pressure`
  * @returns pascal, above 0 and finite, the double nearest to the exact conversion
  * @throws GibbsLedgerError "quantity/not-a-quantity", "quantity/not-finite", "quantity/unknown-unit",
  * "quantity/wrong-dimension", "quantity/not-positive", "quantity/overflow"
  * @example
- * pressureInPascal({ value: 1, unit: "atm" }, ["pressure"]); // => 101325
+ * pressureInPascal({ value: 1, unit: "atm" }); // => 101325
  */
 export function pressureInPascal(value: unknown, path?: FaultPath): number {
   const parts: Reading = value ?? nothing;
@@ -191,7 +191,13 @@ function kelvinOfNinths(value: number, zero: number): number {
 }
 
 /** The slow way through a positive quantity whose parts were read: rarer units, and every fault. */
-function positive(whole: unknown, value: unknown, unit: unknown, dimension: Dimension, path: FaultPath = []): number {
+function positive(
+  whole: unknown,
+  value: unknown,
+  unit: unknown,
+  dimension: Dimension,
+  path: FaultPath = [dimension],
+): number {
   if (typeof whole !== "object" || whole === null) return fail(notAQuantity(whole, dimension, path));
   const si = siOfParts(value, unit, dimension, path);
   return si > 0 ? si : fail(notPositive(si, dimension, path));

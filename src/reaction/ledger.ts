@@ -1,5 +1,5 @@
 import { gasConstantJPerMolK, referenceTemperatureK, standardPressurePa } from "../constants/constants.js";
-import { evaluateAll, intervalIndex, type SeriesValues } from "../heat-capacity/evaluate.js";
+import { evaluateAll, intervalOf, type SeriesValues } from "../heat-capacity/evaluate.js";
 import { exactSum } from "../numeric/compensated.js";
 import { decimalToNumber } from "../numeric/exact-decimal.js";
 import { log } from "../numeric/log.js";
@@ -145,8 +145,8 @@ function standardEntries(term: TermState, state: ReactionState): LedgerEntry[] {
     referenceTemperatureK >= ownPlan.fromK && referenceTemperatureK <= ownPlan.toK
       ? referenceTemperatureK
       : ownPlan.fromK;
-  const atAnchor = evaluateAll(plan, intervalIndex(plan, anchorK), anchorK);
-  const here = evaluateAll(plan, intervalIndex(plan, temperatureK), temperatureK);
+  const atAnchor = evaluateAll(intervalOf(plan, anchorK)!, anchorK);
+  const here = evaluateAll(intervalOf(plan, temperatureK)!, temperatureK);
   const shift = standardPressureEntropy(species);
   const shiftEntropy = shift === undefined ? 0 : decimalToNumber(shift);
   const jumps = transitionsBetween(species, anchorK, temperatureK);
@@ -241,8 +241,8 @@ function transitionsBetween(
   return gibbsFunction.intervals.flatMap(({ to, endsAt }, index) => {
     if (endsAt !== "first-order" || index + 1 === gibbsFunction.intervals.length) return [];
     if (!(to >= lowerK && to < upperK)) return [];
-    const below: SeriesValues = evaluateAll(plan, index, to);
-    const above: SeriesValues = evaluateAll(plan, index + 1, to);
+    const below: SeriesValues = evaluateAll(plan.intervals[index]!, to);
+    const above: SeriesValues = evaluateAll(plan.intervals[index + 1]!, to);
     return [
       {
         temperatureK: to,

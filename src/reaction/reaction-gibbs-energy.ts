@@ -1,7 +1,8 @@
 import { gasConstantJPerMolK } from "../constants/constants.js";
 import type { Fault } from "../errors/fault.js";
 import { failIfAny } from "../errors/gibbs-ledger-error.js";
-import { evaluateAt, intervalIndex, roundingBound } from "../heat-capacity/evaluate.js";
+import { evaluateColumns } from "../heat-capacity/columns.js";
+import { intervalOf, roundingBound } from "../heat-capacity/evaluate.js";
 import { exactDot } from "../numeric/compensated.js";
 import { log } from "../numeric/log.js";
 import type { Quantity } from "../quantity/quantity.js";
@@ -119,9 +120,9 @@ export function reactionDirection(reaction: Reaction, conditions: ReactionCondit
 export function gibbsEnergyOf(reaction: Reaction, state: ReactionState): number {
   const { temperatureK } = state;
   const plan = reactionPlan(reactionPlans(reaction), state.policy);
-  const index = intervalIndex(plan, temperatureK);
-  if (index < 0) return failReactionRange(reaction, temperatureK);
-  const standard = evaluateAt(plan, "gibbsEnergy", index, temperatureK, log(temperatureK));
+  const interval = intervalOf(plan, temperatureK);
+  if (interval === undefined) return failReactionRange(reaction, temperatureK);
+  const standard = evaluateColumns(interval.gibbsEnergy, temperatureK, log(temperatureK));
   return standard + gasConstantJPerMolK * temperatureK * lnQuotientOf(state) + 0;
 }
 
@@ -145,7 +146,8 @@ export function lnQuotientOf({ terms, temperatureK, pressurePa }: ReactionState)
 function gibbsEnergyBound(reaction: Reaction, state: ReactionState): number {
   const plan = reactionPlan(reactionPlans(reaction), state.policy);
   const { temperatureK, pressurePa } = state;
-  const standard = roundingBound(plan, "gibbsEnergy", intervalIndex(plan, temperatureK), temperatureK);
+  const interval = intervalOf(plan, temperatureK)!;
+  const standard = roundingBound(interval, "gibbsEnergy", temperatureK);
   const logarithms = state.terms.reduce(
     (sum, entry) => sum + Math.abs(entry.term.coefficient * lnActivity(entry, temperatureK, pressurePa)),
     0,

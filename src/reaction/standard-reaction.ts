@@ -1,8 +1,7 @@
 import { gasConstantJPerMolK } from "../constants/constants.js";
-import type { FaultPath } from "../errors/fault.js";
 import { fail } from "../errors/gibbs-ledger-error.js";
 import { evaluateColumns } from "../heat-capacity/columns.js";
-import { evaluateAll, intervalIndex, roundingBound, type SeriesFunction } from "../heat-capacity/evaluate.js";
+import { evaluateAll, intervalOf, roundingBound, type SeriesFunction } from "../heat-capacity/evaluate.js";
 import type { RangePolicy } from "../heat-capacity/range-policy.js";
 import { exp } from "../numeric/exp.js";
 import { log } from "../numeric/log.js";
@@ -39,9 +38,6 @@ export interface StandardReactionProperties {
   readonly outsideRange: readonly Label[];
 }
 
-/** Made once: a call that is right makes no path. */
-const temperaturePath: FaultPath = ["temperature"];
-
 /** 1 / ln 10 */
 const log10OfE = Math.LOG10E;
 
@@ -73,12 +69,11 @@ export function standardReactionGibbsEnergy(
   conditions: StandardReactionConditions,
 ): Quantity<"molarEnergy", "J/mol"> {
   const plans = reactionPlans(reaction);
-  const temperatureK = temperatureInKelvin(conditions?.temperature, temperaturePath);
-  const plan = reactionPlan(plans, conditions.outsideRange);
-  const index = intervalIndex(plan, temperatureK);
-  if (index < 0) return failReactionRange(reaction, temperatureK);
-  const combination = plan.intervals[index]!.gibbsEnergy;
-  return { value: evaluateColumns(combination, temperatureK, log(temperatureK)), unit: "J/mol" };
+  const temperatureK = temperatureInKelvin(conditions?.temperature);
+  const interval = intervalOf(reactionPlan(plans, conditions.outsideRange), temperatureK);
+  if (interval === undefined) return failReactionRange(reaction, temperatureK);
+  const value = evaluateColumns(interval.gibbsEnergy, temperatureK, log(temperatureK));
+  return { value, unit: "J/mol" };
 }
 
 /**
@@ -100,12 +95,12 @@ export function standardReactionProperties(
   conditions: StandardReactionConditions,
 ): StandardReactionProperties {
   const plans = reactionPlans(reaction);
-  const temperatureK = temperatureInKelvin(conditions?.temperature, temperaturePath);
+  const temperatureK = temperatureInKelvin(conditions?.temperature);
   const policy = conditions.outsideRange;
   const plan = reactionPlan(plans, policy);
-  const index = intervalIndex(plan, temperatureK);
-  if (index < 0) return failReactionRange(plans.reaction, temperatureK);
-  const values = evaluateAll(plan, index, temperatureK);
+  const interval = intervalOf(plan, temperatureK);
+  if (interval === undefined) return failReactionRange(plans.reaction, temperatureK);
+  const values = evaluateAll(interval, temperatureK);
   const lnK = lnOfConstant(values.gibbsEnergy, temperatureK);
   const heatCapacity: Quantity<"molarEntropy", "J/mol/K"> = { value: values.heatCapacity, unit: "J/mol/K" };
   const properties = {
@@ -132,7 +127,7 @@ export function standardReactionProperties(
  */
 export function equilibriumConstant(reaction: Reaction, conditions: StandardReactionConditions): number {
   const { value } = standardReactionGibbsEnergy(reaction, conditions);
-  const temperatureK = temperatureInKelvin(conditions.temperature, temperaturePath);
+  const temperatureK = temperatureInKelvin(conditions.temperature);
   const lnK = lnOfConstant(value, temperatureK);
   if (lnK > smallestLnK && lnK < largestLnK) return exp(lnK);
   return fail({
@@ -159,11 +154,11 @@ export function standardReactionRoundingBound(
   conditions: StandardReactionConditions,
 ): number {
   const plans = reactionPlans(reaction);
-  const temperatureK = temperatureInKelvin(conditions?.temperature, temperaturePath);
+  const temperatureK = temperatureInKelvin(conditions?.temperature);
   const plan = reactionPlan(plans, conditions.outsideRange);
-  const index = intervalIndex(plan, temperatureK);
-  if (index < 0) return failReactionRange(plans.reaction, temperatureK);
-  return roundingBound(plan, property, index, temperatureK);
+  const interval = intervalOf(plan, temperatureK);
+  if (interval === undefined) return failReactionRange(plans.reaction, temperatureK);
+  return roundingBound(interval, property, temperatureK);
 }
 
 /** ln K = -G / RT */

@@ -1,7 +1,8 @@
 import { describeReceived, type Fault } from "../errors/fault.js";
 import { failIfAny } from "../errors/gibbs-ledger-error.js";
 import { checkArray, checkObject, checkOption } from "../errors/input.js";
-import { evaluateAt, intervalIndex } from "../heat-capacity/evaluate.js";
+import { evaluateColumns } from "../heat-capacity/columns.js";
+import { intervalOf } from "../heat-capacity/evaluate.js";
 import { type RangePolicy, rangePolicies } from "../heat-capacity/range-policy.js";
 import { log } from "../numeric/log.js";
 import { findRoot } from "../numeric/root.js";
@@ -55,15 +56,16 @@ export function temperaturesAtGibbsEnergy(
   const { conditions } = search;
   const plan = reactionPlan(plans, conditions === undefined ? search.outsideRange : conditions.outsideRange);
   [fromK, toK].forEach((temperatureK, index) => {
-    if (intervalIndex(plan, temperatureK) < 0) failReactionRange(plans.reaction, temperatureK, ["between", index]);
+    if (intervalOf(plan, temperatureK) === undefined)
+      failReactionRange(plans.reaction, temperatureK, ["between", index]);
   });
   const distance = (temperatureK: number): number => {
     if (conditions !== undefined) {
       const temperature = { value: temperatureK, unit: "K" } as const;
       return gibbsEnergyOf(plans.reaction, stateOfPresent(plans.reaction, { ...conditions, temperature })) - target;
     }
-    const index = intervalIndex(plan, temperatureK);
-    return evaluateAt(plan, "gibbsEnergy", index, temperatureK, log(temperatureK)) - target;
+    const { gibbsEnergy } = intervalOf(plan, temperatureK)!;
+    return evaluateColumns(gibbsEnergy, temperatureK, log(temperatureK)) - target;
   };
   const inner = plan.endsK.filter((endK) => endK > fromK && endK < toK);
   const roots = rootsBetween(distance, samplePoints([fromK, ...inner, toK]));

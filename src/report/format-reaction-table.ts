@@ -2,7 +2,7 @@ import { gasConstantJPerMolK } from "../constants/constants.js";
 import { describeReceived, type Fault } from "../errors/fault.js";
 import { failIfAny } from "../errors/gibbs-ledger-error.js";
 import { checkArray, checkObject, checkOption } from "../errors/input.js";
-import { intervalIndex } from "../heat-capacity/evaluate.js";
+import { intervalOf } from "../heat-capacity/evaluate.js";
 import { type RangePolicy, rangePolicies } from "../heat-capacity/range-policy.js";
 import { exactSum } from "../numeric/compensated.js";
 import { figureStandardUncertainty } from "../quantity/figure-value.js";
@@ -57,7 +57,7 @@ export function formatReactionTable(reaction: Reaction, options: ReactionTableOp
   const outside = new Set<string>();
   let lowerBound = false;
   const rows = temperaturesK.map((temperatureK, index) => {
-    if (intervalIndex(reactionPlan(plans, outsideRange), temperatureK) < 0) {
+    if (intervalOf(reactionPlan(plans, outsideRange), temperatureK) === undefined) {
       return failReactionRange(house, temperatureK, ["temperatures", index]);
     }
     const properties = standardReactionProperties(house, {

@@ -1,6 +1,6 @@
 import { cut, type Fault, type FaultPath } from "../errors/fault.js";
 import { fail } from "../errors/gibbs-ledger-error.js";
-import { evaluateAll, intervalIndex } from "../heat-capacity/evaluate.js";
+import { evaluateAll, intervalOf } from "../heat-capacity/evaluate.js";
 import { policyHint, type RangePolicy, rangePolicy } from "../heat-capacity/range-policy.js";
 import { temperatureInKelvin } from "../quantity/guards.js";
 import type { Quantity, Temperature } from "../quantity/quantity.js";
@@ -47,12 +47,12 @@ const noLabels: readonly Label[] = Object.freeze([]);
  */
 export function standardProperties(species: SpeciesRecord, conditions: StandardConditions): StandardProperties {
   const record = houseRecord(species, ["species"]);
-  const temperatureK = temperatureInKelvin(conditions?.temperature, ["temperature"]);
+  const temperatureK = temperatureInKelvin(conditions?.temperature);
   const policy = rangePolicy(conditions.outsideRange);
   const plan = speciesPlan(record, policy);
-  const index = intervalIndex(plan, temperatureK);
-  if (index < 0) return failOutsideRange(record, temperatureK, ["temperature"]);
-  const values = evaluateAll(plan, index, temperatureK);
+  const interval = intervalOf(plan, temperatureK);
+  if (interval === undefined) return failOutsideRange(record, temperatureK, ["temperature"]);
+  const values = evaluateAll(interval, temperatureK);
   return {
     ...(plan.heatCapacityKnown ? { heatCapacity: { value: values.heatCapacity, unit: "J/mol/K" } as const } : {}),
     enthalpy: { value: values.enthalpy, unit: "J/mol" },

@@ -1,5 +1,5 @@
 import { describe, expect, test } from "vitest";
-import { evaluateAll, intervalIndex, type SeriesValues } from "../../src/heat-capacity/evaluate.js";
+import { evaluateAll, intervalOf, type SeriesValues } from "../../src/heat-capacity/evaluate.js";
 import { plannedSeries, planOfSeries } from "../../src/heat-capacity/planned-series.js";
 import type { PublishedInterval, PublishedSeries } from "../../src/heat-capacity/published-series.js";
 import type { RangePolicy } from "../../src/heat-capacity/range-policy.js";
@@ -42,7 +42,7 @@ function evaluate(
   policy: RangePolicy = "refuse",
 ): SeriesValues {
   const plan = planOfSeries(plannedSeries(readSeries(series, context)), policy);
-  return evaluateAll(plan, intervalIndex(plan, temperatureK), temperatureK);
+  return evaluateAll(intervalOf(plan, temperatureK)!, temperatureK);
 }
 
 describe("breaks", () => {
@@ -128,7 +128,9 @@ describe("range policies", () => {
   test("refuse: nothing beyond the ends", () => {
     const plan = planOfSeries(plannedSeries(readSeries(steps(), context)), "refuse");
     expect([plan.fromK, plan.toK]).toEqual([200, 900]);
-    expect([199.999, 900.001, 0, Number.NaN].map((value) => intervalIndex(plan, value))).toEqual([-1, -1, -1, -1]);
+    for (const value of [199.999, 900.001, 0, Number.NaN, Number.POSITIVE_INFINITY]) {
+      expect(intervalOf(plan, value)).toBeUndefined();
+    }
   });
 
   test("constant-heat-capacity: Cp stays, H and S go on without a break", () => {
