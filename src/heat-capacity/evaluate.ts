@@ -1,6 +1,6 @@
 import { log } from "../numeric/log.js";
 import { absoluteTerms, evaluateColumns } from "./columns.js";
-import type { IntervalColumns, SeriesPlan } from "./merge.js";
+import type { IntervalColumns, PlanInterval, SeriesPlan } from "./merge.js";
 
 /** The functions of temperature that a series gives. */
 export type SeriesFunction = keyof IntervalColumns;
@@ -14,11 +14,10 @@ export interface SeriesValues {
 }
 
 /** The interval that a temperature belongs to; undefined outside the range, and for what is no temperature. */
-export function intervalOf(plan: SeriesPlan, temperatureK: number): IntervalColumns | undefined {
-  let index = 0;
-  // Beyond the last end nothing is greater, and the interval is undefined.
-  while (temperatureK > plan.endsK[index]!) index += 1;
-  return temperatureK >= plan.fromK ? plan.intervals[index] : undefined;
+export function intervalOf(plan: SeriesPlan, temperatureK: number): PlanInterval | undefined {
+  let interval: PlanInterval | undefined = plan.lowest;
+  while (interval !== undefined && temperatureK > interval.toK) interval = interval.above;
+  return temperatureK >= plan.fromK ? interval : undefined;
 }
 
 /** All four functions at a temperature of an interval. */

@@ -35,13 +35,22 @@ export interface IntervalColumns {
   readonly gibbsEnergy: Columns;
 }
 
+/** One interval of a plan; the intervals above it hang on it, which is faster to walk than an array of ends. */
+export interface PlanInterval extends IntervalColumns {
+  /** Upper end in kelvin; it belongs to this interval. */
+  readonly toK: number;
+  readonly above: PlanInterval | undefined;
+}
+
 /** A sum of series over temperature, rounded once and ready to evaluate. */
 export interface SeriesPlan {
   readonly fromK: number;
   readonly toK: number;
   /** Upper ends of the intervals in kelvin, rising; an end belongs to its interval. */
   readonly endsK: readonly number[];
-  readonly intervals: readonly IntervalColumns[];
+  /** In rising order. */
+  readonly intervals: readonly PlanInterval[];
+  readonly lowest: PlanInterval;
   readonly heatCapacityKnown: boolean;
 }
 
@@ -73,13 +82,26 @@ export function mergeSeries(parts: readonly WeightedSeries[]): SeriesPlan | unde
   intervals.forEach((interval, index) => {
     refuseOverflow(interval, index === 0 ? fromK : endsK[index - 1]!, endsK[index]!);
   });
+  const linked = linkedIntervals(intervals, endsK);
   return {
     fromK,
     toK,
     endsK,
-    intervals,
+    intervals: linked,
+    lowest: linked[0]!,
     heatCapacityKnown: parts.every((part) => part.series.heatCapacityKnown),
   };
+}
+
+function linkedIntervals(intervals: readonly IntervalColumns[], endsK: readonly number[]): readonly PlanInterval[] {
+  const linked: PlanInterval[] = [];
+  let above: PlanInterval | undefined;
+  for (let index = intervals.length - 1; index >= 0; index -= 1) {
+    const { heatCapacity, enthalpy, entropy, gibbsEnergy } = intervals[index]!;
+    above = { toK: endsK[index]!, heatCapacity, enthalpy, entropy, gibbsEnergy, above };
+    linked.unshift(above);
+  }
+  return linked;
 }
 
 /**

@@ -3,7 +3,7 @@ import { log } from "../../../dist/numeric/log.js";
 import { mergedCoefficients, temperaturesK, waterGasShift } from "../water-gas-shift.mjs";
 
 export const note =
-  "standardReactionGibbsEnergy, four units mixed, results kept; reference: the same conversions and sum on raw doubles";
+  "standardReactionGibbsEnergy, four units mixed, results kept; reference: the same operations on raw doubles";
 
 const units = ["K", "Cel", "[degF]", "[degR]"];
 
@@ -56,21 +56,26 @@ function ninths(value, zero, zeroLow) {
 }
 
 const [below, above] = mergedCoefficients.map(([a1, a2, a3, a4, a5, a6, a7, a8, a9]) => ({
-  inverse: -a1 / 2,
   constant: a2 + a8,
-  logarithm: a2,
   linear: a3 - a9,
-  linearLogarithm: -a3,
   square: -a4 / 2,
   cube: -a5 / 6,
   fourth: -a6 / 12,
   fifth: -a7 / 20,
+  inverse: -a1 / 2,
+  inverseSquare: 0,
+  logarithm: a2,
+  linearLogarithm: -a3,
 }));
 
-function gibbsEnergy(temperature) {
-  const c = temperature <= 1000 ? below : above;
-  const lnT = log(temperature);
-  const higher = temperature * (c.cube + temperature * (c.fourth + temperature * c.fifth));
-  const powers = temperature * (c.linear + c.linearLogarithm * lnT + temperature * (c.square + higher));
-  return c.constant + c.logarithm * lnT + powers + c.inverse / temperature;
+/** The same operations in the same order as the library's evaluation of a merged series. */
+function gibbsEnergy(t) {
+  const c = t <= 1000 ? below : above;
+  const r = 1 / t;
+  return (
+    log(t) * (c.logarithm + t * c.linearLogarithm) +
+    (c.constant +
+      t * (c.linear + t * (c.square + t * (c.cube + t * (c.fourth + t * c.fifth)))) +
+      r * (c.inverse + r * c.inverseSquare))
+  );
 }
