@@ -61,12 +61,30 @@ export function nameOfPower(exponent: number): BasisName | undefined {
   return basis.find(([, power]) => power === exponent)?.[0];
 }
 
-/** Puts columns together; extras with coefficient zero are left out. */
+/**
+ * Puts columns together; extras with coefficient zero are left out. Written out member by member: a spread object keeps
+ * most members out of line, and its numbers are slower to read.
+ */
 export function columns(coefficients: Readonly<Record<BasisName, number>>, extras: readonly ExtraPower[]): Columns {
   const { inverseCube, root, inverseRoot } = coefficients;
   const present = extras.filter((extra) => extra.coefficient !== 0);
-  const isPlain = inverseCube === 0 && root === 0 && inverseRoot === 0 && present.length === 0;
-  return { ...coefficients, extras: present, isPlain };
+  return {
+    constant: coefficients.constant,
+    linear: coefficients.linear,
+    square: coefficients.square,
+    cube: coefficients.cube,
+    fourth: coefficients.fourth,
+    fifth: coefficients.fifth,
+    inverse: coefficients.inverse,
+    inverseSquare: coefficients.inverseSquare,
+    logarithm: coefficients.logarithm,
+    linearLogarithm: coefficients.linearLogarithm,
+    isPlain: inverseCube === 0 && root === 0 && inverseRoot === 0 && present.length === 0,
+    inverseCube,
+    root,
+    inverseRoot,
+    extras: present,
+  };
 }
 
 /**
