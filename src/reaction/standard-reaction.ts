@@ -123,7 +123,8 @@ export function standardReactionProperties(
  * @throws GibbsLedgerError "reaction/constant-out-of-range" below 2.3e-308 and above 1.7e308: use `log10K`
  * @example
  * import { referenceData } from "gibbs-ledger/data";
- * const dissociation = reaction("N2O4(g) = 2 NO2(g)", { species: [] }); // throws species/not-found
+ * const shift = reaction("CO(g) + H2O(g) = CO2(g) + H2(g)", referenceData);
+ * equilibriumConstant(shift, { temperature: quantity(1000, "K") }); // => 1.4...
  */
 export function equilibriumConstant(reaction: Reaction, conditions: StandardReactionConditions): number {
   const { value } = standardReactionGibbsEnergy(reaction, conditions);
