@@ -85,10 +85,10 @@ function arrayFunction(
   finish?: (value: number, temperatureK: number) => number,
 ): ArrayFunction {
   const combinations = plan.intervals.map((interval) => interval[name]);
+  const ends = plan.intervals.map(({ toK }) => toK);
   return (temperaturesK, out) => {
     checkArrays(temperaturesK, out);
     checkTemperatures(plan, temperaturesK);
-    const ends = plan.endsK;
     for (let place = 0; place < temperaturesK.length; place += 1) {
       const temperatureK = temperaturesK[place]!;
       let index = 0;

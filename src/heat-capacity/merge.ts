@@ -46,10 +46,9 @@ export interface PlanInterval extends IntervalColumns {
 export interface SeriesPlan {
   readonly fromK: number;
   readonly toK: number;
-  /** Upper ends of the intervals in kelvin, rising; an end belongs to its interval. */
-  readonly endsK: readonly number[];
   /** In rising order. */
   readonly intervals: readonly PlanInterval[];
+  /** The first of them, where a walk begins. */
   readonly lowest: PlanInterval;
   readonly heatCapacityKnown: boolean;
 }
@@ -82,26 +81,25 @@ export function mergeSeries(parts: readonly WeightedSeries[]): SeriesPlan | unde
   intervals.forEach((interval, index) => {
     refuseOverflow(interval, index === 0 ? fromK : endsK[index - 1]!, endsK[index]!);
   });
-  const linked = linkedIntervals(intervals, endsK);
+  const chain = chained(intervals, endsK);
   return {
     fromK,
     toK,
-    endsK,
-    intervals: linked,
-    lowest: linked[0]!,
+    intervals: chain,
+    lowest: chain[0]!,
     heatCapacityKnown: parts.every((part) => part.series.heatCapacityKnown),
   };
 }
 
-function linkedIntervals(intervals: readonly IntervalColumns[], endsK: readonly number[]): readonly PlanInterval[] {
-  const linked: PlanInterval[] = [];
+function chained(intervals: readonly IntervalColumns[], endsK: readonly number[]): readonly PlanInterval[] {
+  const chain: PlanInterval[] = [];
   let above: PlanInterval | undefined;
   for (let index = intervals.length - 1; index >= 0; index -= 1) {
     const { heatCapacity, enthalpy, entropy, gibbsEnergy } = intervals[index]!;
     above = { toK: endsK[index]!, heatCapacity, enthalpy, entropy, gibbsEnergy, above };
-    linked.unshift(above);
+    chain.unshift(above);
   }
-  return linked;
+  return chain;
 }
 
 /**

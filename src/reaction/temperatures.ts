@@ -67,7 +67,7 @@ export function temperaturesAtGibbsEnergy(
     const { gibbsEnergy } = intervalOf(plan, temperatureK)!;
     return evaluateColumns(gibbsEnergy, temperatureK, log(temperatureK)) - target;
   };
-  const inner = plan.endsK.filter((endK) => endK > fromK && endK < toK);
+  const inner = plan.intervals.map((interval) => interval.toK).filter((endK) => endK > fromK && endK < toK);
   const roots = rootsBetween(distance, samplePoints([fromK, ...inner, toK]));
   return roots.map((value) => ({ value, unit: "K" }));
 }
