@@ -4,6 +4,7 @@
  */
 export const faultCodes = [
   // any room
+  "input/conflicting-options",
   "input/forbidden-key",
   "input/missing",
   "input/not-an-array",
@@ -27,6 +28,10 @@ export const faultCodes = [
   "quantity/syntax",
   "quantity/unknown-unit",
   "quantity/wrong-dimension",
+  // uncertainty
+  "uncertainty/inconsistent-datum",
+  "uncertainty/invalid-coverage",
+  "uncertainty/overflow",
   // formula
   "formula/ambiguous-dot",
   "formula/charge-order",
@@ -52,7 +57,10 @@ export const faultCodes = [
   "species/duplicate-label",
   "species/inconsistent",
   "species/invalid-record",
+  "species/mixed-conventions",
   "species/model-missing",
+  "species/no-join",
+  "species/no-reference",
   "species/not-found",
   "species/outside-range",
   // fugacity
@@ -63,13 +71,29 @@ export const faultCodes = [
   "fugacity/missing-critical-constants",
   "fugacity/outside-validity",
   "fugacity/unphysical",
+  // activity
+  "activity/invalid-component",
+  "activity/scale-not-served",
+  "activity/unphysical",
+  // standard-state
+  "standard-state/charged-gas",
+  "standard-state/invalid-composition",
+  "standard-state/invalid-molecule",
+  "standard-state/missing-enthalpy-increment",
+  "standard-state/no-electrons",
+  "standard-state/no-solvent",
+  "standard-state/no-state",
+  "standard-state/other-convention",
+  "standard-state/volume-of-gas",
   // reaction
   "reaction/coefficient-out-of-range",
   "reaction/constant-out-of-range",
+  "reaction/different-records",
   "reaction/empty",
   "reaction/invalid",
   "reaction/no-common-range",
   "reaction/not-a-reaction",
+  "reaction/not-balanceable",
   "reaction/syntax",
   "reaction/too-long",
   "reaction/too-many-species",
@@ -78,9 +102,13 @@ export const faultCodes = [
   // conditions
   "conditions/duplicate-label",
   "conditions/fractions-do-not-sum",
+  "conditions/invalid-amount",
+  "conditions/invalid-density",
   "conditions/invalid-fraction",
   "conditions/missing-activity",
+  "conditions/missing-activity-model",
   "conditions/missing-composition",
+  "conditions/mixed-standard-states",
   "conditions/pressure-mismatch",
   "conditions/unknown-label",
   "conditions/zero-activity",
@@ -98,6 +126,10 @@ export const faultCodes = [
   "checks/no-inputs",
   // report
   "report/no-rows",
+  // exchange
+  "exchange/duplicate-key",
+  "exchange/not-json",
+  "exchange/too-deep",
 ] as const;
 
 /** One of the closed set of fault codes. */

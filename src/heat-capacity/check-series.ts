@@ -1,7 +1,7 @@
 import { describeReceived, type Fault, type FaultPath } from "../errors/fault.js";
 import { checkArray, checkNumber, checkObject, checkOption } from "../errors/input.js";
 import { checkFigure } from "../quantity/check-figure.js";
-import { checkForm } from "./forms.js";
+import { checkForm } from "./check-form.js";
 import type { PublishedInterval, PublishedSeries } from "./published-series.js";
 
 /** Keys of a published series, for rooms that add keys of their own. */

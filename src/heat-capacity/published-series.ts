@@ -8,10 +8,29 @@ import type { Figure } from "../quantity/figure.js";
  * - `"seven-coefficient"`: Cp/R = a1 + a2 T + a3 T^2 + a4 T^3 + a5 T^4; a6 and a7 are the constants of H/R and S/R.
  * - `"nine-coefficient"`: Cp/R = a1 T^-2 + a2 T^-1 + a3 + a4 T + a5 T^2 + a6 T^3 + a7 T^4; a8 and a9 are the constants
  *   of H/R and S/R.
+ * - `"gibbs-energy"`: a, b, c, d_1, ..., d_k in J/mol with G = a + b T + c T ln T + sum of d_i T^(powers_i), as for the
+ *   elements by Dinsdale (1991). G is relative to the enthalpy of the elements at 298.15 K, so that the constant of H is
+ *   a and that of S is -b - c; Cp = -c - sum of n (n - 1) d T^(n - 1). Every interval has all powers, with 0 for what it
+ *   lacks. For a magnetic element it is the part without magnetism.
  * - `"maier-kelley"`: Cp = a + b T + c T^-2, without constants.
+ * - `"berman-brown"`: k0, k1, k2, k3 of Cp = k0 + k1 T^(-1/2) + k2 T^-2 + k3 T^-3, without constants (Berman and Brown
+ *   1985).
+ * - `"five-term"`: Cp = a1 + a2 T + a3 T^-2 + a4 T^(-1/2) + a5 T^2, without constants (Robie, Hemingway and Fisher
+ *   1978; Robie and Hemingway 1995).
+ * - `"haas-fisher"`: a, b, c, f, g of Cp = a + 2 b T + c T^-2 + f T^2 + g T^(-1/2), without constants (Haas and Fisher
+ *   1976). It has the powers of `"five-term"`, but b is half of a2, and f and g stand in the other order.
  * - `"polynomial"`: Cp = sum of c_i T^(powers_i), without constants.
  */
-export type HeatCapacityForm = "shomate" | "seven-coefficient" | "nine-coefficient" | "maier-kelley" | "polynomial";
+export type HeatCapacityForm =
+  | "shomate"
+  | "seven-coefficient"
+  | "nine-coefficient"
+  | "gibbs-energy"
+  | "maier-kelley"
+  | "berman-brown"
+  | "five-term"
+  | "haas-fisher"
+  | "polynomial";
 
 /** One temperature interval of a published fit. */
 export interface PublishedInterval {
@@ -36,7 +55,10 @@ export interface PublishedSeries {
   readonly gasConstant?: number;
   /** Unit of the printed coefficients of forms without constants; J/mol/K when absent. */
   readonly unit?: "J/mol/K" | "cal_th/mol/K";
-  /** Exponents of T of a `"polynomial"`, one a coefficient. */
+  /**
+   * Exponents of T, multiples of 1/2 from -20 to 20, each once: of a `"polynomial"` in Cp, one a coefficient; of a
+   * `"gibbs-energy"` in G, one for each coefficient after the third, none of them 0 or 1.
+   */
   readonly powers?: readonly number[];
   /**
    * Powers of ten that the printed coefficients were multiplied by, one a coefficient: 3 where the heading says

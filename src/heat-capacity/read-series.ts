@@ -10,7 +10,8 @@ import {
 import { exactFigureInSi, figureInSi } from "../quantity/figure-value.js";
 import { integralsAt } from "./exact-integrals.js";
 import { intervalAt, type PiecewiseSeries } from "./exact-series.js";
-import { type IntervalTerms, readInterval } from "./forms.js";
+import type { IntervalTerms } from "./form-readers.js";
+import { readInterval } from "./forms.js";
 import type { PublishedSeries } from "./published-series.js";
 
 /** A temperature where H in J/mol and S in J/mol/K are known. */

@@ -46,7 +46,8 @@ const readOnce = new WeakMap<object, PlannedSeries>();
  * @throws GibbsLedgerError "heat-capacity/outside-range", "heat-capacity/intervals",
  * "heat-capacity/coefficient-count", "heat-capacity/unknown-form", "heat-capacity/no-anchor", all faults at once
  * @remarks Arithmetic: within the bounds that are returned, 4 eps times the sum of the absolute terms.
- * @see `references.mcbride2002` `references.chase1998`
+ * @see `references.mcbride2002` `references.chase1998` `references.dinsdale1991` `references.kelley1960`
+ * `references.berman1985` `references.haas1976` `references.robie1978` `references.robie1995`
  * @example
  * const properties = seriesProperties(
  *   {

@@ -18,7 +18,8 @@ export function checkFigure(value: unknown, dimension: Dimension, path: FaultPat
   if (figure.uncertainty !== undefined) checkUncertainty(figure.uncertainty, [...path, "uncertainty"], faults);
 }
 
-function checkUncertainty(value: unknown, path: FaultPath, faults: Fault[]): void {
+/** Checks a published uncertainty: half the width of an interval, and the probability that it covers. */
+export function checkUncertainty(value: unknown, path: FaultPath, faults: Fault[]): void {
   const uncertainty = checkObject(value, path, faults, { required: ["halfWidth", "coverage"], optional: [] });
   if (uncertainty === undefined) return;
   if (uncertainty.halfWidth !== undefined) {

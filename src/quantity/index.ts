@@ -17,6 +17,7 @@ export {
   type Energy,
   type Fraction,
   type Mass,
+  type MassDensity,
   type Molality,
   type MolarEnergy,
   type MolarEntropy,

@@ -43,6 +43,8 @@ export type Mass = Quantity<"mass">;
 export type Molality = Quantity<"molality">;
 /** Amount of substance per volume. */
 export type Concentration = Quantity<"concentration">;
+/** Mass per volume. */
+export type MassDensity = Quantity<"massDensity">;
 /** A number of dimension one. */
 export type Fraction = Quantity<"fraction">;
 /** Electric potential difference. */

@@ -7,7 +7,17 @@ import { figure } from "./random-series.js";
 const at = (temperatureK: number) => ({ temperature: { value: temperatureK, unit: "K" } }) as const;
 
 test("the forms are listed in alphabetical order", () => {
-  expect(heatCapacityForms).toEqual(["maier-kelley", "nine-coefficient", "polynomial", "seven-coefficient", "shomate"]);
+  expect(heatCapacityForms).toEqual([
+    "berman-brown",
+    "five-term",
+    "gibbs-energy",
+    "haas-fisher",
+    "maier-kelley",
+    "nine-coefficient",
+    "polynomial",
+    "seven-coefficient",
+    "shomate",
+  ]);
 });
 
 // Every figure below is recalled from memory; the tolerance is half a unit of the last printed digit, or as stated.

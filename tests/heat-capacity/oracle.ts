@@ -66,6 +66,14 @@ function textbook(series: PublishedSeries, interval: PublishedInterval, T: Decim
       return scaled(sevenCoefficient(c, T), new Decimal(series.gasConstant!));
     case "nine-coefficient":
       return scaled(nineCoefficient(c, T), new Decimal(series.gasConstant!));
+    case "gibbs-energy":
+      return gibbsEnergy(c, series.powers!, T);
+    case "berman-brown":
+      return anchored(series, c, [0, -0.5, -2, -3], T);
+    case "five-term":
+      return anchored(series, c, [0, 1, -2, -0.5, 2], T);
+    case "haas-fisher":
+      return anchored(series, [c[0]!, c[1]!.times(2), c[2]!, c[3]!, c[4]!], [0, 1, -2, 2, -0.5], T);
     case "maier-kelley":
       return anchored(series, c, [0, 1, -2], T);
     case "polynomial":
@@ -166,6 +174,28 @@ function nineCoefficient(coefficients: readonly Decimal[], T: Decimal): Three {
       a7.times(T.pow(4)).div(4),
       a9,
     ]),
+  };
+}
+
+/** From G = a + bT + cT ln T + sum of d T^n: S = -dG/dT, H = -T^2 d(G/T)/dT, Cp = -T d2G/dT2. */
+function gibbsEnergy(coefficients: readonly Decimal[], powers: readonly number[], T: Decimal): Three {
+  const [a, b, c, ...d] = coefficients as [Decimal, Decimal, Decimal, ...Decimal[]];
+  const each = (value: (n: number, d: Decimal) => Decimal): Decimal =>
+    sum(powers.map((n, index) => value(n, d[index]!)));
+  const curvature = c.div(T).plus(
+    each((n, d) =>
+      d
+        .times(n)
+        .times(n - 1)
+        .times(power(T, n - 2)),
+    ),
+  );
+  const slope = sum([b, c, c.times(ln(T)), each((n, d) => d.times(n).times(power(T, n - 1)))]);
+  const slopeOverT = sum([a.div(T.pow(2)).negated(), c.div(T), each((n, d) => d.times(n - 1).times(power(T, n - 2)))]);
+  return {
+    heatCapacity: T.times(curvature).negated(),
+    enthalpy: T.pow(2).times(slopeOverT).negated(),
+    entropy: slope.negated(),
   };
 }
 

@@ -65,11 +65,34 @@ const maierKelleys = fc
     }),
   );
 
+/** An anchored form whose terms in Cp have these powers, in joules or calories. */
+function anchoredForm(form: HeatCapacityForm, exponents: readonly number[]): fc.Arbitrary<PublishedSeries> {
+  return fc
+    .tuple(anchors, fc.constantFrom("J/mol/K" as const, "cal_th/mol/K" as const))
+    .chain(([anchor, unit]) => seriesOf(form, exponents, { anchor, unit }));
+}
+
+const gibbsPowers = [-20, -9, -3, -1.5, -1, -0.5, 0.5, 1.5, 2, 3, 4, 5, 6, 7, 9.5, 20];
+
+/** Coefficients of G are of the size of those of Cp times 1000 K; some as printed under a heading with powers of ten. */
+const gibbsEnergies = fc
+  .tuple(fc.oneof(fc.constant([2, 3, -1]), fc.subarray(gibbsPowers)), fc.boolean())
+  .chain(([powers, isShifted]) => {
+    const shifts = powers.map((n) => (isShifted ? Math.min(30, Math.max(-30, Math.round(3 * (n - 1)))) : 0));
+    const printed = powers.map((n, index) => n - 1 - shifts[index]! / 3);
+    const decimalShifts = isShifted ? { decimalShifts: [0, 0, 0, ...shifts] } : {};
+    return seriesOf("gibbs-energy", [-1, 0, 0, ...printed], { powers, ...decimalShifts });
+  });
+
 /** Random fits of each form over one interval from 200 K to 3000 K. */
 export const randomSeries: Readonly<Record<HeatCapacityForm, fc.Arbitrary<PublishedSeries>>> = {
   shomate: seriesOf("shomate", [0, 0, 0, 0, 0, 0, 0], {}),
   "seven-coefficient": seriesOf("seven-coefficient", [0, 1, 2, 3, 4, -1, 0], { gasConstant: 8.31451 }),
   "nine-coefficient": seriesOf("nine-coefficient", [-2, -1, 0, 1, 2, 3, 4, -1, 0], { gasConstant: 8.31451 }),
+  "gibbs-energy": gibbsEnergies,
   "maier-kelley": maierKelleys,
+  "berman-brown": anchoredForm("berman-brown", [0, -0.5, -2, -3]),
+  "five-term": anchoredForm("five-term", [0, 1, -2, -0.5, 2]),
+  "haas-fisher": anchoredForm("haas-fisher", [0, 1, -2, 2, -0.5]),
   polynomial: polynomials,
 };

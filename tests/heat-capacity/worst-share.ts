@@ -22,8 +22,8 @@ export function cancelled(series: PublishedSeries, temperatureK: number): Publis
     const value = new Decimal(enthalpy.value).minus(gibbsEnergy).toNumber();
     return { ...series, anchor: { ...series.anchor, enthalpy: { ...enthalpy, value } } };
   }
-  const place = interval!.coefficients.length - 2;
-  const unit = series.form === "shomate" ? 1000 : series.gasConstant!;
+  const place = series.form === "gibbs-energy" ? 0 : interval!.coefficients.length - 2;
+  const unit = series.form === "shomate" ? 1000 : (series.gasConstant ?? 1);
   const constant = new Decimal(interval!.coefficients[place]!).minus(gibbsEnergy.div(unit)).toNumber();
   const coefficients = interval!.coefficients.map((value, index) => (index === place ? constant : value));
   return { ...series, intervals: [{ ...interval!, coefficients }] };

@@ -14,11 +14,32 @@ expectTypeOf<SeriesFunction>().toEqualTypeOf<"heatCapacity" | "enthalpy" | "entr
 expectTypeOf(heatCapacityForms).toEqualTypeOf<readonly HeatCapacityForm[]>();
 expectTypeOf(rangePolicies).toEqualTypeOf<readonly RangePolicy[]>();
 expectTypeOf<RangePolicy>().toEqualTypeOf<"refuse" | "constant-heat-capacity" | "continue-fit">();
+expectTypeOf<HeatCapacityForm>().toEqualTypeOf<
+  | "shomate"
+  | "seven-coefficient"
+  | "nine-coefficient"
+  | "gibbs-energy"
+  | "maier-kelley"
+  | "berman-brown"
+  | "five-term"
+  | "haas-fisher"
+  | "polynomial"
+>();
+expectTypeOf({
+  kind: "series",
+  form: "gibbs-energy",
+  powers: [2, 3, -1],
+  intervals: [{ from: 298.15, to: 700, coefficients: [0, 0, -24, 0, 0, 0], endsAt: "first-order" }],
+} as const).toExtend<PublishedSeries>();
 
 // @ts-expect-error a pressure is no temperature
 seriesProperties(series, { temperature: quantity(1, "bar") });
 // @ts-expect-error the forms are a closed set
 seriesProperties({ ...series, form: "seven" }, { temperature: quantity(300, "K") });
+// @ts-expect-error forms are spelled in full words
+seriesProperties({ ...series, form: "gibbs" }, { temperature: quantity(300, "K") });
+// @ts-expect-error powers are numbers
+seriesProperties({ ...series, form: "gibbs-energy", powers: ["2"] }, { temperature: quantity(300, "K") });
 // @ts-expect-error an interval says what its upper end is
 seriesProperties({ ...series, intervals: [{ from: 1, to: 2, coefficients: [] }] }, { temperature: quantity(300, "K") });
 // @ts-expect-error fits are readonly
