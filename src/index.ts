@@ -18,15 +18,14 @@ export {
   type Temperature,
 } from "./quantity/quantity.js";
 export { type Dimension, isUnitCode, type UnitCode, type UnitOf } from "./quantity/units.js";
-export type { GasComposition, LabelMap, ReactionConditions } from "./reaction/conditions.js";
-export {
-  type Ledger,
-  type LedgerEntry,
-  type LedgerEntryName,
-  type LedgerGroup,
-  type LedgerSum,
-  ledger,
-} from "./reaction/ledger.js";
+export { affinity } from "./reaction/affinity.js";
+export { type Balance, type BalancedEquation, balance } from "./reaction/balance.js";
+export type { UnbalancedEquation } from "./reaction/balance-participants.js";
+export { combineReactions, type ReactionPart } from "./reaction/combine-reactions.js";
+export type { GasComposition, LabelMap, ReactionConditions, SolutionComposition } from "./reaction/conditions.js";
+export { type Ledger, ledger } from "./reaction/ledger.js";
+export type { LedgerEntry, LedgerEntryName, LedgerGroup } from "./reaction/ledger-entry.js";
+export type { LedgerSum } from "./reaction/ledger-sum.js";
 export { type Reaction, type ReactionTerm, reaction } from "./reaction/reaction.js";
 export {
   lnReactionQuotient,
@@ -45,5 +44,12 @@ export type { StandardState, StandardStates } from "./reaction/standard-state.js
 export { type TemperatureSearch, temperaturesAtGibbsEnergy } from "./reaction/temperatures.js";
 export { formatLedger } from "./report/format-ledger.js";
 export { formatReactionTable, type ReactionTableOptions } from "./report/format-reaction-table.js";
-export type { CollectionData, Label, SpeciesRecord } from "./species/record.js";
+export {
+  type ElementOfFormation,
+  type FormationConditions,
+  type FormationProperties,
+  formationProperties,
+} from "./species/formation-properties.js";
+export type { CollectionData, Label, PhaseSequence, SpeciesRecord } from "./species/record.js";
 export { type StandardConditions, type StandardProperties, standardProperties } from "./species/standard-properties.js";
+export type { HydrogenElectron, StableSequence, Substance } from "./species/substance.js";

@@ -9,7 +9,7 @@ import { log } from "../numeric/log.js";
 import type { Reaction } from "../reaction/reaction.js";
 import { reactionPlans } from "../reaction/reaction.js";
 import { reactionPlan } from "../reaction/reaction-plan.js";
-import { lnOfConstant } from "../reaction/standard-reaction.js";
+import { lnOfConstant } from "../species/ln-of-constant.js";
 
 /** What is fixed when a reaction is compiled. */
 export interface CompileOptions {

@@ -18,17 +18,25 @@ export function checkFraction(value: unknown, path: FaultPath, faults: Fault[]):
   return undefined;
 }
 
+/** What to list where fractions fall short of 1, by the phase that they describe. */
+const completeList = { gas: "list inert gases too", solution: "list the solvent and inert species too" } as const;
+
 /** Checks that fractions sum to 1 within 1e-9; collects "conditions/fractions-do-not-sum". */
-export function checkFractionSum(fractions: Iterable<number>, path: FaultPath, faults: Fault[]): void {
+export function checkFractionSum(
+  fractions: Iterable<number>,
+  path: FaultPath,
+  faults: Fault[],
+  phase: "gas" | "solution" = "gas",
+): void {
   const sum = exactSum([...fractions]);
   if (Math.abs(sum - 1) <= fractionTolerance) return;
   faults.push({
     code: "conditions/fractions-do-not-sum",
     path,
-    message: `the mole fractions of the gas sum to ${sum}, not to 1`,
+    message: `the mole fractions of the ${phase} sum to ${sum}, not to 1`,
     received: String(sum),
     expected: `1 within ${fractionTolerance}`,
-    hint: "list inert gases too; nothing is renormalised",
+    hint: `${completeList[phase]}; nothing is renormalised`,
   });
 }
 

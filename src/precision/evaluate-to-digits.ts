@@ -16,7 +16,7 @@ import type { Temperature } from "../quantity/quantity.js";
 import { houseReaction, type Reaction } from "../reaction/reaction.js";
 import { failReactionRange } from "../reaction/reaction-plan.js";
 import { standardReactionProperties } from "../reaction/standard-reaction.js";
-import { exactSpeciesSeries } from "../species/species-function.js";
+import { exactSubstanceSeries } from "../species/substance-function.js";
 
 /** At what temperature, and to how many significant digits. */
 export interface DigitsConditions {
@@ -126,7 +126,7 @@ function sumToDigits(house: Reaction, temperatureK: number, working: number): Su
   const sum = { heatCapacity: new Wide(0), enthalpy: new Wide(0), entropy: new Wide(0) };
   const scale = { ...sum };
   for (const { exactCoefficient, species } of house.terms) {
-    const series = exactSpeciesSeries(species, working);
+    const series = exactSubstanceSeries(species, working);
     if (temperatureK < lowerEndK(series) || temperatureK > upperEndK(series)) failReactionRange(house, temperatureK);
     const { numerator, denominator } = parseRational(exactCoefficient) as Rational;
     const coefficient = new Wide(numerator.toString()).div(denominator.toString());

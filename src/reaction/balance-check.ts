@@ -10,11 +10,11 @@ import {
   rational,
   rationalToString,
 } from "../numeric/rational.js";
-import type { SpeciesRecord } from "../species/record.js";
+import { chargeNumberOf, formulaOf, type Substance } from "../species/substance.js";
 
 /** A species with its stoichiometric number: negative on the left. */
 export interface Stoichiometry {
-  readonly species: SpeciesRecord;
+  readonly species: Substance;
   readonly coefficient: Rational;
 }
 
@@ -28,12 +28,13 @@ export function checkBalance(terms: readonly Stoichiometry[], faults: Fault[]): 
     const isLeft = coefficient.numerator < 0n;
     const side = isLeft ? left : right;
     const count = isLeft ? negateRational(coefficient) : coefficient;
-    for (const [element, text] of Object.entries(formula(species.formula).exactCounts)) {
+    const written = formulaOf(species);
+    const counts = written === undefined ? {} : formula(written).exactCounts;
+    for (const [element, text] of Object.entries(counts)) {
       add(side, element, multiplyRationals(count, parseRational(text) as Rational));
     }
-    if (species.chargeNumber !== 0) {
-      add(side, charge, multiplyRationals(count, rational(BigInt(species.chargeNumber), 1n)));
-    }
+    const chargeNumber = chargeNumberOf(species);
+    if (chargeNumber !== 0) add(side, charge, multiplyRationals(count, rational(BigInt(chargeNumber), 1n)));
   }
   for (const key of new Set([...left.keys(), ...right.keys()])) {
     const onLeft = left.get(key) ?? none;

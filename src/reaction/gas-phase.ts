@@ -9,6 +9,7 @@ import { idealGas } from "../fugacity/ideal-gas.js";
 import { exactSum } from "../numeric/compensated.js";
 import { checkQuantity } from "../quantity/guards.js";
 import type { Label, SpeciesRecord } from "../species/record.js";
+import { isRecord } from "../species/substance.js";
 import type { Reaction } from "./reaction.js";
 
 /** The composition of a gas, checked. */
@@ -41,14 +42,15 @@ export function checkGas(
   if (gas === undefined) return undefined;
   const equationOfState = gas.equationOfState === undefined ? idealGas() : gas.equationOfState;
   checkEquationOfState(equationOfState, ["gas", "equationOfState"], faults);
-  const species = new Map<Label, SpeciesRecord>();
-  for (const { label, species: record } of reaction.terms) if (record.state === "g") species.set(label, record);
-  for (const record of inerts) species.set(record.label, record);
+  const inertGases = inerts.filter(({ state }) => state === "g");
+  const reacting = reaction.terms.flatMap(({ species: record }) =>
+    isRecord(record) && record.state === "g" ? record : [],
+  );
+  const species = new Map([...reacting, ...inertGases].map((record) => [record.label, record]));
   const composition = checkComposition(gas, pressurePa, faults);
   if (composition === undefined) return undefined;
-  const { fractions, path } = composition;
+  const { fractions, labels: named, path } = composition;
   const labels = [...species.keys()];
-  const inert = new Set(inerts.map(({ label }) => label));
   for (const label of fractions.keys()) {
     if (!species.has(label)) {
       faults.push(unknownLabel(label, [...path, cut(label)], labels, "a gas of the reaction, or of inerts"));
@@ -62,8 +64,8 @@ export function checkGas(
       });
     }
   }
-  for (const label of inert) {
-    if (!fractions.has(label)) {
+  for (const { label } of inertGases) {
+    if (!named.includes(label)) {
       faults.push({
         code: "conditions/missing-composition",
         path: [...path, label],
@@ -81,13 +83,21 @@ export function checkGas(
   };
 }
 
+interface GivenFractions {
+  /** Of those labels whose value is sound. */
+  readonly fractions: ReadonlyMap<Label, number>;
+  /** What the composition names, whether its value is sound or not. */
+  readonly labels: readonly Label[];
+  readonly path: FaultPath;
+}
+
 type FractionMembers = { readonly moleFractions?: unknown; readonly partialPressures?: unknown };
 
 function checkComposition(
   gas: FractionMembers,
   pressurePa: number | undefined,
   faults: Fault[],
-): { readonly fractions: ReadonlyMap<Label, number>; readonly path: FaultPath } | undefined {
+): GivenFractions | undefined {
   const given = (["moleFractions", "partialPressures"] as const).filter((key) => gas[key] !== undefined);
   if (given.length !== 1) {
     faults.push({
@@ -104,6 +114,7 @@ function checkComposition(
   if (members === undefined) return undefined;
   const before = faults.length;
   const fractions = new Map<Label, number>();
+  const labels = Object.keys(members);
   for (const [label, value] of Object.entries(members)) {
     const here = [...path, cut(label)];
     const fraction =
@@ -112,10 +123,10 @@ function checkComposition(
         : fractionOfPressure(value, pressurePa, here, faults);
     if (fraction !== undefined) fractions.set(label, fraction);
   }
-  if (faults.length > before) return { fractions, path };
+  if (faults.length > before) return { fractions, labels, path };
   if (key === "moleFractions") checkFractionSum(fractions.values(), path, faults);
   else if (pressurePa !== undefined) checkPressureSum(fractions.values(), pressurePa, faults);
-  return { fractions, path };
+  return { fractions, labels, path };
 }
 
 function fractionOfPressure(
@@ -140,7 +151,8 @@ function fractionOfPressure(
   return pressurePa === undefined ? undefined : partialPa / pressurePa;
 }
 
-function checkPressureSum(fractions: Iterable<number>, pressurePa: number, faults: Fault[]): void {
+/** Checks that partial pressures, as fractions of the pressure, make up the whole of it. */
+export function checkPressureSum(fractions: Iterable<number>, pressurePa: number, faults: Fault[]): void {
   const sum = exactSum([...fractions]);
   if (Math.abs(sum - 1) <= fractionTolerance) return;
   faults.push({

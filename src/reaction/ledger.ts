@@ -1,64 +1,20 @@
-import { gasConstantJPerMolK, referenceTemperatureK, standardPressurePa } from "../constants/constants.js";
-import { evaluateAll, intervalOf, type SeriesValues } from "../heat-capacity/evaluate.js";
-import { exactSum } from "../numeric/compensated.js";
-import { decimalToNumber } from "../numeric/exact-decimal.js";
+import { gasConstantJPerMolK, standardPressurePa } from "../constants/constants.js";
 import { log } from "../numeric/log.js";
-import type { Figure } from "../quantity/figure.js";
-import { figureStandardUncertainty } from "../quantity/figure-value.js";
 import type { Quantity } from "../quantity/quantity.js";
-import type { Source } from "../references/source.js";
 import { type SpeciesGrade, speciesGrade } from "../species/grade.js";
-import type { Label, SpeciesRecord } from "../species/record.js";
-import { speciesPlan, standardPressureEntropy } from "../species/species-function.js";
+import type { Label } from "../species/record.js";
+import { phaseAt } from "../species/substance-function.js";
 import type { ReactionConditions } from "./conditions.js";
+import { type LedgerEntry, type LedgerEntryName, type LedgerGroup, tagged } from "./ledger-entry.js";
+import { type LedgerSum, sumOfEntries } from "./ledger-sum.js";
 import type { Reaction } from "./reaction.js";
 import { reactionPlans } from "./reaction.js";
 import { gibbsEnergyOf, lnQuotientOf, stateOfPresent } from "./reaction-gibbs-energy.js";
 import { labelsOutside } from "./reaction-plan.js";
 import type { ReactionState } from "./reaction-state.js";
+import { standardEntries } from "./standard-entries.js";
 import type { StandardStates } from "./standard-state.js";
-import type { TermState } from "./term-state.js";
-
-/** What an entry of a ledger accounts for. */
-export type LedgerEntryName =
-  | "formation enthalpy"
-  | "reference entropy"
-  | "sensible heat"
-  | "heat-capacity entropy"
-  | "transition"
-  | "standard pressure"
-  | "pressure"
-  | "composition"
-  | "activity"
-  | "non-ideality"
-  | "volume";
-
-/** The three parts of a ledger: the species at 298.15 K, the way to the temperature, the way to the conditions. */
-export type LedgerGroup = "formation" | "temperature" | "conditions";
-
-/** One line of a ledger: what one species contributes to the Gibbs energy of the reaction, and why. */
-export interface LedgerEntry {
-  readonly group: LedgerGroup;
-  readonly entry: LedgerEntryName;
-  readonly label: Label;
-  /** Stoichiometric number. */
-  readonly coefficient: number;
-  /** The contribution; its standard uncertainty is absent where none is published. */
-  readonly value: Quantity<"molarEnergy", "J/mol">;
-  /** Where the figure comes from; absent for terms that follow from the conditions. */
-  readonly source?: Source;
-  /** The published figure that gives the uncertainty, where its source is another one. */
-  readonly secondSource?: Source;
-  /** What the reader has to know of this line. */
-  readonly note?: string;
-}
-
-/** Sum of the entries of a group, with the standard uncertainty as far as it is known. */
-export interface LedgerSum {
-  readonly value: Quantity<"molarEnergy", "J/mol">;
-  /** True where an entry of unknown uncertainty makes the stated one a lower bound. */
-  readonly uncertaintyIsLowerBound: boolean;
-}
+import { lacksVolume, type TermState } from "./term-state.js";
 
 /** The itemised account of a Gibbs energy of reaction. */
 export interface Ledger {
@@ -76,6 +32,8 @@ export interface Ledger {
   readonly lnReactionQuotient: number;
   /** Name of the equation of state, where there is a gas. */
   readonly equationOfState?: string;
+  /** Name of the activity model, where there is a solution. */
+  readonly activityModel?: string;
   readonly standardStates: StandardStates;
   /** Grade of each species' data, by group of figures. */
   readonly grades: Readonly<Record<Label, SpeciesGrade>>;
@@ -92,7 +50,8 @@ const groups: readonly LedgerGroup[] = ["formation", "temperature", "conditions"
  * composition, non-ideality and volume, each with unit, source and uncertainty. The entries sum to the total.
  *
  * @param reaction - what `reaction` returned
- * @param conditions - temperature, pressure, the composition of the gas with its inerts, activities given by the caller
+ * @param conditions - temperature, pressure, composition of gas and solution with their inerts, activities given by
+ * the caller
  * @returns plain data; {@link formatLedger} prints it
  * @throws GibbsLedgerError as {@link reactionGibbsEnergy}
  * @remarks Arithmetic: the total equals the direct route within 1e-12 of the largest entry.
@@ -111,11 +70,14 @@ export function ledger(reaction: Reaction, conditions: ReactionConditions): Ledg
   const house = plans.reaction;
   const state = stateOfPresent(house, conditions);
   const direct = gibbsEnergyOf(house, state);
-  const entries = state.terms.flatMap((term) => [...standardEntries(term, state), ...conditionEntries(term, state)]);
+  const entries = state.terms.flatMap((term) => [
+    ...standardEntries(term.term, state.temperatureK, state.policy),
+    ...conditionEntries(term, state),
+  ]);
   const ordered = groups.flatMap((group) => entries.filter((entry) => entry.group === group));
-  const sum = sumOf(ordered);
+  const sum = sumOfEntries(ordered);
   const subtotals = Object.fromEntries(
-    groups.map((group) => [group, sumOf(ordered.filter((entry) => entry.group === group))]),
+    groups.map((group) => [group, sumOfEntries(ordered.filter((entry) => entry.group === group))]),
   ) as Record<LedgerGroup, LedgerSum>;
   return {
     equation: house.equation,
@@ -128,80 +90,14 @@ export function ledger(reaction: Reaction, conditions: ReactionConditions): Ledg
     directGibbsEnergy: { value: direct, unit: "J/mol" },
     lnReactionQuotient: lnQuotientOf(state),
     ...(state.equationOfState === undefined ? {} : { equationOfState: state.equationOfState }),
+    ...(state.activityModel === undefined ? {} : { activityModel: state.activityModel }),
     standardStates: plans.standardStates,
-    grades: Object.fromEntries(house.terms.map(({ label, species }) => [label, speciesGrade(species)])),
+    grades: Object.fromEntries(
+      house.terms.map(({ label, species }) => [label, speciesGrade(phaseAt(species, state.temperatureK))]),
+    ),
     outsideRange: labelsOutside(house, state.temperatureK),
     notes: [...house.notes, ...state.notes, ...missingVolumes(state)],
   };
-}
-
-/** The entries that lead from the elements at 298.15 K to the standard state at the temperature. */
-function standardEntries(term: TermState, state: ReactionState): LedgerEntry[] {
-  const { species, coefficient, label } = term.term;
-  const { temperatureK, policy } = state;
-  const plan = speciesPlan(species, policy);
-  const ownPlan = speciesPlan(species, "refuse");
-  const anchorK =
-    referenceTemperatureK >= ownPlan.fromK && referenceTemperatureK <= ownPlan.toK
-      ? referenceTemperatureK
-      : ownPlan.fromK;
-  const atAnchor = evaluateAll(intervalOf(plan, anchorK)!, anchorK);
-  const here = evaluateAll(intervalOf(plan, temperatureK)!, temperatureK);
-  const shift = standardPressureEntropy(species);
-  const shiftEntropy = shift === undefined ? 0 : decimalToNumber(shift);
-  const jumps = transitionsBetween(species, anchorK, temperatureK);
-  const jumpEnthalpy = exactSum(jumps.map(({ enthalpy }) => enthalpy));
-  const jumpEntropy = exactSum(jumps.map(({ entropy }) => entropy));
-  const source = sourceOf(species);
-  const note = anchorK === referenceTemperatureK ? {} : { note: `at ${anchorK} K` };
-  const make = (
-    group: LedgerGroup,
-    entry: LedgerEntryName,
-    value: number,
-    rest: Partial<LedgerEntry> = {},
-    uncertainty?: number,
-  ): LedgerEntry => ({
-    group,
-    entry,
-    label,
-    coefficient,
-    value: tagged(coefficient * value, uncertainty === undefined ? undefined : Math.abs(coefficient * uncertainty)),
-    ...rest,
-  });
-  const entropyUncertainty = figureStandardUncertainty(species.standardEntropy);
-  const entries = [
-    make(
-      "formation",
-      "formation enthalpy",
-      atAnchor.enthalpy,
-      { ...source, ...secondSource(species, species.formationEnthalpy), ...note },
-      figureStandardUncertainty(species.formationEnthalpy),
-    ),
-    make(
-      "formation",
-      "reference entropy",
-      -temperatureK * (atAnchor.entropy - shiftEntropy),
-      { ...source, ...secondSource(species, species.standardEntropy), ...note },
-      entropyUncertainty === undefined ? undefined : temperatureK * entropyUncertainty,
-    ),
-    make("temperature", "sensible heat", here.enthalpy - atAnchor.enthalpy - jumpEnthalpy, source),
-    make(
-      "temperature",
-      "heat-capacity entropy",
-      -temperatureK * (here.entropy - atAnchor.entropy - jumpEntropy),
-      source,
-    ),
-    ...jumps.map((jump) =>
-      make("temperature", "transition", jump.enthalpy - temperatureK * jump.entropy, {
-        ...source,
-        note: `at ${jump.temperatureK} K`,
-      }),
-    ),
-  ];
-  if (shift !== undefined) {
-    entries.push(make("conditions", "standard pressure", -temperatureK * shiftEntropy, {}, 0));
-  }
-  return entries;
 }
 
 /** The entries that lead from the standard state to the real pressure and composition. */
@@ -215,77 +111,38 @@ function conditionEntries(state: TermState, { temperatureK, pressurePa }: Reacti
     coefficient,
     value: tagged(value, uncertainty),
   });
-  if (state.kind === "given") return [make("activity", thermal * log(state.activity!), 0)];
-  if (state.kind === "pure") {
-    return state.volumeWork === undefined ? [] : [make("volume", coefficient * state.volumeWork)];
+  const volume = (work: number | undefined): LedgerEntry[] =>
+    work === undefined ? [] : [make("volume", coefficient * work)];
+  const nonIdeality = (ln: number): LedgerEntry[] => (ln === 0 ? [] : [make("non-ideality", thermal * ln)]);
+  switch (state.kind) {
+    case "electron":
+      return [];
+    case "given":
+      return [make("activity", thermal * log(state.activity), 0)];
+    case "pure":
+      return volume(state.volumeWork);
+    case "gas":
+      return [
+        make("pressure", thermal * log(pressurePa / standardPressurePa), 0),
+        make("composition", thermal * log(state.moleFraction), 0),
+        ...nonIdeality(state.lnFugacityCoefficient),
+      ];
+    case "solute":
+      return [
+        make("composition", thermal * log(state.amount), 0),
+        ...nonIdeality(state.lnActivityCoefficient),
+        ...volume(state.volumeWork),
+      ];
+    case "solvent":
+      return [
+        make("composition", thermal * state.lnIdealActivity, 0),
+        ...nonIdeality(state.lnSolventActivity - state.lnIdealActivity),
+        ...volume(state.volumeWork),
+      ];
   }
-  const nonIdeality = thermal * state.lnFugacityCoefficient!;
-  return [
-    make("pressure", thermal * log(pressurePa / standardPressurePa), 0),
-    make("composition", thermal * log(state.moleFraction!), 0),
-    ...(nonIdeality === 0 ? [] : [make("non-ideality", nonIdeality)]),
-  ];
-}
-
-/** Jumps of H and S at first-order breaks between two temperatures, counted upward. */
-function transitionsBetween(
-  species: SpeciesRecord,
-  anchorK: number,
-  temperatureK: number,
-): { readonly temperatureK: number; readonly enthalpy: number; readonly entropy: number }[] {
-  const { gibbsFunction } = species;
-  if (gibbsFunction.kind !== "series") return [];
-  const plan = speciesPlan(species, "refuse");
-  const sign = temperatureK >= anchorK ? 1 : -1;
-  const [lowerK, upperK] = sign > 0 ? [anchorK, temperatureK] : [temperatureK, anchorK];
-  return gibbsFunction.intervals.flatMap(({ to, endsAt }, index) => {
-    if (endsAt !== "first-order" || index + 1 === gibbsFunction.intervals.length) return [];
-    if (!(to >= lowerK && to < upperK)) return [];
-    const below: SeriesValues = evaluateAll(plan.intervals[index]!, to);
-    const above: SeriesValues = evaluateAll(plan.intervals[index + 1]!, to);
-    return [
-      {
-        temperatureK: to,
-        enthalpy: sign * (above.enthalpy - below.enthalpy),
-        entropy: sign * (above.entropy - below.entropy),
-      },
-    ];
-  });
 }
 
 function missingVolumes({ terms, pressurePa }: ReactionState): string[] {
   if (pressurePa === standardPressurePa) return [];
-  return terms
-    .filter(({ kind, volumeWork }) => kind === "pure" && volumeWork === undefined)
-    .map(({ term }) => `${term.label} has no molar volume; its volume work is left out`);
-}
-
-function sourceOf({ gibbsFunction, formationEnthalpy }: SpeciesRecord): { readonly source?: Source } {
-  const source = gibbsFunction.kind === "series" ? gibbsFunction.source : formationEnthalpy?.source;
-  return source === undefined ? {} : { source };
-}
-
-function secondSource(species: SpeciesRecord, figure: Figure | undefined): { readonly secondSource?: Source } {
-  const first = sourceOf(species).source;
-  return figure === undefined || isSameSource(figure.source, first) ? {} : { secondSource: figure.source };
-}
-
-/** Sources in a user's own words are the same where the words are. */
-function isSameSource(a: Source, b: Source | undefined): boolean {
-  return typeof a === "object" && typeof b === "object" ? a.text === b.text : a === b;
-}
-
-/** Independent entries add in quadrature: each datum stands in one entry only. */
-function sumOf(entries: readonly LedgerEntry[]): LedgerSum {
-  const known = entries.map(({ value }) => value.standardUncertainty).filter((u) => u !== undefined);
-  const squares = exactSum(known.map((u) => u * u));
-  return {
-    value: tagged(exactSum(entries.map(({ value }) => value.value)), Math.sqrt(squares)),
-    uncertaintyIsLowerBound: known.length < entries.length,
-  };
-}
-
-function tagged(value: number, standardUncertainty: number | undefined): Quantity<"molarEnergy", "J/mol"> {
-  const base = { value: value + 0, unit: "J/mol" } as const;
-  return standardUncertainty === undefined ? base : { ...base, standardUncertainty };
+  return terms.filter(lacksVolume).map(({ term }) => `${term.label} has no molar volume; its volume work is left out`);
 }

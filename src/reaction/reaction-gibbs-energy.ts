@@ -11,7 +11,7 @@ import type { Reaction } from "./reaction.js";
 import { reactionPlans } from "./reaction.js";
 import { failReactionRange, reactionPlan } from "./reaction-plan.js";
 import { type ReactionState, reactionState } from "./reaction-state.js";
-import { checkZeroActivities, lnActivity } from "./term-state.js";
+import { checkZeroActivities, isAbsent, lnActivity } from "./term-state.js";
 
 /** Which way a reaction runs at a composition, and why. */
 export interface ReactionDirection {
@@ -29,11 +29,13 @@ export interface ReactionDirection {
 /**
  * Natural logarithm of the reaction quotient, ln Q = sum of nu ln a, at a real composition and pressure.
  *
- * The activity of a gas is y phi p / 1 bar, of a pure condensed phase exp(V (p - 1 bar) / RT), of any other species
- * what the caller gives.
+ * The activity of a gas is y phi p / 1 bar, of a pure condensed phase exp(V (p - 1 bar) / RT), of a dissolved species
+ * m gamma / (1 mol/kg), of a liquid of a mixture x gamma and of the solvent what the activity model says, both with
+ * their volume work, of the electron 1; of any other species it is what the caller gives.
  *
  * @param reaction - what `reaction` returned
- * @param conditions - temperature, pressure, the composition of the gas with its inerts, activities given by the caller
+ * @param conditions - temperature, pressure, composition of gas and solution with their inerts, activities given by
+ * the caller
  * @returns a number of dimension one; at equilibrium it equals ln K
  * @throws GibbsLedgerError "conditions/zero-activity", "conditions/unknown-label",
  * "conditions/fractions-do-not-sum" and other faults of the conditions, all at once
@@ -56,7 +58,8 @@ export function lnReactionQuotient(reaction: Reaction, conditions: ReactionCondi
  * reaction as written.
  *
  * @param reaction - what `reaction` returned
- * @param conditions - temperature, pressure, the composition of the gas with its inerts, activities given by the caller
+ * @param conditions - temperature, pressure, composition of gas and solution with their inerts, activities given by
+ * the caller
  * @returns a quantity in J/mol; negative where the reaction runs forward
  * @throws GibbsLedgerError as {@link lnReactionQuotient}, and "species/outside-range"
  * @example
@@ -82,7 +85,8 @@ export function reactionGibbsEnergy(
  * absent only in reverse, and no number is needed.
  *
  * @param reaction - what `reaction` returned
- * @param conditions - as of {@link reactionGibbsEnergy}; fractions and activities of reacting species may be zero
+ * @param conditions - as of {@link reactionGibbsEnergy}; fractions, molalities and activities of reacting species may be
+ * zero
  * @throws GibbsLedgerError as {@link reactionGibbsEnergy}, but for "conditions/zero-activity"
  * @example
  * import { referenceData } from "gibbs-ledger/data";
@@ -97,7 +101,7 @@ export function reactionGibbsEnergy(
 export function reactionDirection(reaction: Reaction, conditions: ReactionConditions): ReactionDirection {
   const { reaction: house } = reactionPlans(reaction);
   const state = reactionState(house, conditions);
-  const absent = state.terms.filter(({ moleFraction, activity }) => (moleFraction ?? activity) === 0);
+  const absent = state.terms.filter(isAbsent);
   const reactants = absent.filter(({ term }) => term.coefficient < 0).map(({ term }) => term.label);
   const products = absent.filter(({ term }) => term.coefficient > 0).map(({ term }) => term.label);
   if (reactants.length > 0 && products.length > 0) {

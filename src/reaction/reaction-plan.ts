@@ -4,8 +4,8 @@ import { mergeSeries, type SeriesPlan } from "../heat-capacity/merge.js";
 import { extendSeries, policyHint, type RangePolicy, rangePolicy } from "../heat-capacity/range-policy.js";
 import { parseRational, type Rational } from "../numeric/rational.js";
 import type { Label } from "../species/record.js";
-import { speciesPlan, speciesSeries } from "../species/species-function.js";
 import { isInRange, outsideRangeFault } from "../species/standard-properties.js";
+import { substancePlan, substanceSeries } from "../species/substance-function.js";
 import type { Reaction, ReactionPlans } from "./reaction.js";
 
 /** The merged series of a reaction under a policy; absent: refuse. */
@@ -39,7 +39,7 @@ function makePlan(plans: ReactionPlans, policy: RangePolicy): SeriesPlan {
   const merged = mergeSeries(
     plans.reaction.terms.map(({ exactCoefficient, species }) => ({
       coefficient: parseRational(exactCoefficient) as Rational,
-      series: extendSeries(speciesSeries(species), policy),
+      series: extendSeries(substanceSeries(species), policy),
     })),
   );
   if (merged === undefined) return failNoCommonRange(plans.reaction);
@@ -50,7 +50,7 @@ function makePlan(plans: ReactionPlans, policy: RangePolicy): SeriesPlan {
 
 function failNoCommonRange(reaction: Reaction): never {
   const ranges = reaction.terms.map(({ label, species }) => {
-    const { fromK, toK } = speciesPlan(species, "refuse");
+    const { fromK, toK } = substancePlan(species, "refuse");
     return `${label} ${fromK} K to ${toK} K`;
   });
   return fail({

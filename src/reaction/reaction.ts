@@ -13,13 +13,16 @@ import {
   rationalToNumber,
   rationalToString,
 } from "../numeric/rational.js";
-import { collectSpecies } from "../species/collection.js";
-import { collectHouseRecord } from "../species/house-record.js";
-import type { CollectionData, Label, SpeciesRecord } from "../species/record.js";
+import { checkConventions } from "../species/check-conventions.js";
+import { collectSubstance } from "../species/find-substance.js";
+import { collectHouseSubstance } from "../species/house-substance.js";
+import type { CollectionData, Label } from "../species/record.js";
+import type { Substance } from "../species/substance.js";
 import { checkBalance, type Stoichiometry } from "./balance-check.js";
 import { checkCoefficients } from "./check-coefficients.js";
 import { type EquationTerm, maximumSpecies, parseEquation } from "./equation.js";
 import { type StandardStates, standardStateOf } from "./standard-state.js";
+import { writeEquation } from "./write-equation.js";
 
 /** A species of a reaction with its stoichiometric number: negative for reactants, positive for products. */
 export interface ReactionTerm {
@@ -27,7 +30,8 @@ export interface ReactionTerm {
   readonly coefficient: number;
   /** The same number exactly, as a whole number or a fraction such as `-3/2`. */
   readonly exactCoefficient: string;
-  readonly species: SpeciesRecord;
+  /** The record; or the stable sequence that the label names, or the electron. */
+  readonly species: Substance;
 }
 
 /** A balanced reaction: plain data, frozen, with its own copies of its species' records. */
@@ -64,8 +68,9 @@ const adopted = new WeakMap<object, HouseReaction>();
  * Reads a chemical equation against a collection and checks that it balances, elements and charge, exactly.
  *
  * Sides are joined by `=`, `->`, `<=>` or a Unicode arrow; coefficients are whole, decimal or fractional. A species may
- * be named by anything that `findSpecies` resolves. A species that stands twice, or on both sides, is combined,
- * and the notes say so. Energies of the reaction are per mole of reaction as written.
+ * be named by anything that `findSpecies` resolves; `Fe(cr)` names the stable sequence where the collection has one, and
+ * `e^-` the electron by the standard-hydrogen convention, 1/2 H2(g) - H^+(aq). A species that stands twice, or on both
+ * sides, is combined, and the notes say so. Energies of the reaction are per mole of reaction as written.
  *
  * @param equation - at most 4,000 characters and 200 species
  * @param collection - a collection, or plain `{ species }`
@@ -81,10 +86,10 @@ export function reaction(equation: string, collection: CollectionData): Reaction
   const { left, right } = parseEquation(equation);
   const faults: Fault[] = [];
   const notes: string[] = [];
-  const sums = new Map<Label, { species: SpeciesRecord; coefficient: Rational }>();
+  const sums = new Map<Label, { species: Substance; coefficient: Rational }>();
   const addSide = (terms: readonly EquationTerm[], isLeft: boolean): void => {
     for (const term of terms) {
-      const species = collectSpecies(collection, term.name, ["equation"], faults);
+      const species = collectSubstance(collection, term.name, ["equation"], faults);
       if (species === undefined) continue;
       const signed = isLeft ? negateRational(term.coefficient) : term.coefficient;
       const before = sums.get(species.label);
@@ -117,9 +122,14 @@ export function reaction(equation: string, collection: CollectionData): Reaction
   } else {
     checkCoefficients(terms, ["equation"], faults);
     checkBalance(terms, faults);
+    checkConventions(
+      terms.map(({ species }) => species),
+      ["equation"],
+      faults,
+    );
   }
   failIfAny(faults);
-  return register(terms, notes);
+  return registerReaction(terms, notes);
 }
 
 /**
@@ -157,6 +167,8 @@ function adoptReaction(value: unknown): HouseReaction {
     failIfAny(faults);
   }
   const members = checkObject(value, ["reaction"], faults, { required: ["equation", "terms", "notes"], optional: [] });
+  // The terms decide, and the equation is written anew from them.
+  if (members?.equation !== undefined) checkText(members.equation, ["reaction", "equation"], faults, 1_000_000);
   const notes = checkArray(members?.notes, ["reaction", "notes"], faults) ?? [];
   notes.forEach((note, index) => {
     checkText(note, ["reaction", "notes", index], faults);
@@ -174,9 +186,14 @@ function adoptReaction(value: unknown): HouseReaction {
   if (faults.length === 0) {
     checkCoefficients(terms, ["reaction", "terms"], faults);
     checkBalance(terms, faults);
+    checkConventions(
+      terms.map(({ species }) => species),
+      ["reaction", "terms"],
+      faults,
+    );
   }
   failIfAny(faults);
-  const house = register(terms, notes as string[]);
+  const house = registerReaction(terms, notes as string[]);
   adopted.set(value as object, house);
   return house;
 }
@@ -187,7 +204,7 @@ function checkTerm(value: unknown, path: FaultPath, faults: Fault[]): Stoichiome
     optional: [],
   });
   if (term?.species === undefined) return [];
-  const species = collectHouseRecord(term.species, [...path, "species"], faults);
+  const species = collectHouseSubstance(term.species, [...path, "species"], faults);
   const exact = typeof term.exactCoefficient === "string" ? parseRational(term.exactCoefficient) : undefined;
   if (exact === undefined || isZeroRational(exact) || rationalToNumber(exact) !== term.coefficient) {
     faults.push({
@@ -213,7 +230,8 @@ function checkTerm(value: unknown, path: FaultPath, faults: Fault[]): Stoichiome
   return [{ species, coefficient: exact }];
 }
 
-function register(stoichiometry: readonly Stoichiometry[], notes: readonly string[]): HouseReaction {
+/** The house's reaction of terms that have been checked. */
+export function registerReaction(stoichiometry: readonly Stoichiometry[], notes: readonly string[]): HouseReaction {
   const ordered = [
     ...stoichiometry.filter(({ coefficient }) => coefficient.numerator < 0n),
     ...stoichiometry.filter(({ coefficient }) => coefficient.numerator > 0n),
@@ -226,7 +244,8 @@ function register(stoichiometry: readonly Stoichiometry[], notes: readonly strin
       species,
     }),
   );
-  const house = { equation: equationOf(ordered), terms: Object.freeze(terms), notes: frozenCopy(notes) };
+  const written = ordered.map(({ species: { label }, coefficient }) => ({ label, coefficient }));
+  const house = { equation: writeEquation(written), terms: Object.freeze(terms), notes: frozenCopy(notes) };
   const states = terms.map(({ label, species }) => [label, standardStateOf(species)] as const);
   const plans: ReactionPlans = {
     reaction: house,
@@ -235,16 +254,4 @@ function register(stoichiometry: readonly Stoichiometry[], notes: readonly strin
     others: new Map(),
   };
   return Object.freeze(Object.defineProperty(house, plansKey, { value: plans }) as HouseReaction);
-}
-
-function equationOf(terms: readonly Stoichiometry[]): string {
-  const side = (isLeft: boolean): string =>
-    terms
-      .filter(({ coefficient }) => coefficient.numerator < 0n === isLeft)
-      .map(({ species, coefficient }) => {
-        const count = rationalToString(isLeft ? negateRational(coefficient) : coefficient);
-        return count === "1" ? species.label : `${count} ${species.label}`;
-      })
-      .join(" + ");
-  return `${side(true)} = ${side(false)}`;
 }

@@ -1,4 +1,3 @@
-import { gasConstantJPerMolK } from "../constants/constants.js";
 import { fail } from "../errors/gibbs-ledger-error.js";
 import { evaluateColumns } from "../heat-capacity/columns.js";
 import { evaluateAll, intervalOf, roundingBound, type SeriesFunction } from "../heat-capacity/evaluate.js";
@@ -7,6 +6,7 @@ import { exp } from "../numeric/exp.js";
 import { log } from "../numeric/log.js";
 import { temperatureInKelvin } from "../quantity/guards.js";
 import type { Quantity, Temperature } from "../quantity/quantity.js";
+import { lnOfConstant, log10OfE } from "../species/ln-of-constant.js";
 import type { Label } from "../species/record.js";
 import type { Reaction } from "./reaction.js";
 import { reactionPlans } from "./reaction.js";
@@ -37,9 +37,6 @@ export interface StandardReactionProperties {
   /** Labels of the species evaluated outside their own range. */
   readonly outsideRange: readonly Label[];
 }
-
-/** 1 / ln 10 */
-const log10OfE = Math.LOG10E;
 
 /** Largest ln K whose exponential a double holds. */
 const largestLnK = 709.782712893384;
@@ -160,11 +157,6 @@ export function standardReactionRoundingBound(
   const interval = intervalOf(plan, temperatureK);
   if (interval === undefined) return failReactionRange(plans.reaction, temperatureK);
   return roundingBound(interval, property, temperatureK);
-}
-
-/** ln K = -G / RT */
-export function lnOfConstant(gibbsEnergy: number, temperatureK: number): number {
-  return -gibbsEnergy / (gasConstantJPerMolK * temperatureK) + 0;
 }
 
 const noLabels: readonly Label[] = Object.freeze([]);

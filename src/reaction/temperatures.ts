@@ -22,7 +22,7 @@ export interface TemperatureSearch {
   readonly between: readonly [from: Temperature, to: Temperature];
   /** Pressure and composition held; absent: the standard Gibbs energy is meant. */
   readonly conditions?: Omit<ReactionConditions, "temperature">;
-  /** Without conditions: `"refuse"` when absent. */
+  /** `"refuse"` when absent. Conditions have an `outsideRange` of their own, and beside them this one is refused. */
   readonly outsideRange?: RangePolicy;
 }
 
@@ -39,7 +39,8 @@ const samplesPerInterval = 64;
  * @param reaction - what `reaction` returned
  * @param search - between which temperatures, at which Gibbs energy, and at which pressure and composition
  * @returns temperatures in kelvin; an empty array where the value is not met
- * @throws GibbsLedgerError "roots/empty-range", "species/outside-range", and the faults of conditions
+ * @throws GibbsLedgerError "roots/empty-range", "species/outside-range", "input/conflicting-options" where
+ * outsideRange stands beside conditions or these have a temperature, and the faults of conditions
  * @example
  * import { referenceData } from "gibbs-ledger/data";
  * const boudouard = reaction("C(cr,graphite) + CO2(g) = 2 CO(g)", referenceData);
@@ -88,6 +89,23 @@ function checkSearch(search: TemperatureSearch): CheckedSearch {
   failIfAny(members === undefined ? faults : []);
   const { gibbsEnergy, outsideRange, conditions } = members ?? {};
   if (conditions !== undefined) checkObject(conditions, ["conditions"], faults, { required: [], optional: "any" });
+  if ((conditions as Partial<ReactionConditions> | null | undefined)?.temperature !== undefined) {
+    faults.push({
+      code: "input/conflicting-options",
+      path: ["conditions", "temperature"],
+      message: "the conditions of a search have no temperature: it is what is sought",
+      expected: "between, for the temperatures to look at",
+    });
+  }
+  if (conditions !== undefined && outsideRange !== undefined) {
+    faults.push({
+      code: "input/conflicting-options",
+      path: ["outsideRange"],
+      message: "outsideRange is given beside conditions, which have their own",
+      received: describeReceived(outsideRange),
+      expected: "conditions: { ..., outsideRange }",
+    });
+  }
   if (outsideRange !== undefined) checkOption(outsideRange, ["outsideRange"], faults, rangePolicies);
   const target = gibbsEnergy === undefined ? 0 : checkQuantity(gibbsEnergy, "molarEnergy", ["gibbsEnergy"], faults);
   const between = members?.between === undefined ? undefined : checkArray(members.between, ["between"], faults, 2);

@@ -1,7 +1,9 @@
 import type { Fault } from "../errors/fault.js";
 import { failIfAny } from "../errors/gibbs-ledger-error.js";
 import { checkObject } from "../errors/input.js";
-import type { Ledger, LedgerEntry, LedgerGroup, LedgerSum } from "../reaction/ledger.js";
+import type { Ledger } from "../reaction/ledger.js";
+import type { LedgerEntry, LedgerGroup } from "../reaction/ledger-entry.js";
+import type { LedgerSum } from "../reaction/ledger-sum.js";
 import type { Source } from "../references/source.js";
 import { caution } from "./caution.js";
 import { layOut, row, rule, type TextColumn } from "./columns.js";
@@ -84,10 +86,11 @@ function checkAccount(account: unknown): void {
   failIfAny(faults);
 }
 
-function conditionsLine({ temperature, pressure, equationOfState }: Ledger): string {
+function conditionsLine({ temperature, pressure, equationOfState, activityModel }: Ledger): string {
   const bar = Number((pressure.value / 1e5).toPrecision(7));
   const gas = equationOfState === undefined ? "" : `, gas: ${equationOfState}`;
-  return `T = ${Number(temperature.value.toPrecision(7))} K, p = ${bar} bar${gas}`;
+  const solution = activityModel === undefined ? "" : `, solution: ${activityModel}`;
+  return `T = ${Number(temperature.value.toPrecision(7))} K, p = ${bar} bar${gas}${solution}`;
 }
 
 function entryCells({ entry, label, coefficient, value, source, secondSource, note }: LedgerEntry): string[] {
@@ -104,8 +107,8 @@ function entryCells({ entry, label, coefficient, value, source, secondSource, no
 
 /** What does not fit into the column stands below the table. */
 function withNote({ entry, note }: { entry: string; note: string | undefined }): string {
-  const text = `${entry} ${note ?? ""}`.trimEnd();
-  return text.length <= entryWidth ? text : entry;
+  const texts = [`${entry} ${note ?? ""}`.trimEnd(), `${entry} ${note?.replace("at ", "") ?? ""}`];
+  return texts.find((text) => text.length <= entryWidth) ?? entry;
 }
 
 function longNotes(account: Ledger): string[] {

@@ -4,12 +4,12 @@ import { failIfAny } from "../errors/gibbs-ledger-error.js";
 import { checkArray, checkObject, checkOption } from "../errors/input.js";
 import { intervalOf } from "../heat-capacity/evaluate.js";
 import { type RangePolicy, rangePolicies } from "../heat-capacity/range-policy.js";
-import { exactSum } from "../numeric/compensated.js";
-import { figureStandardUncertainty } from "../quantity/figure-value.js";
 import { checkPositiveQuantity } from "../quantity/guards.js";
 import type { Temperature } from "../quantity/quantity.js";
+import { sumOfEntries } from "../reaction/ledger-sum.js";
 import { type Reaction, reactionPlans } from "../reaction/reaction.js";
 import { failReactionRange, reactionPlan } from "../reaction/reaction-plan.js";
+import { standardEntries } from "../reaction/standard-entries.js";
 import { standardReactionProperties } from "../reaction/standard-reaction.js";
 import { caution } from "./caution.js";
 import { layOut, type TextColumn } from "./columns.js";
@@ -65,7 +65,7 @@ export function formatReactionTable(reaction: Reaction, options: ReactionTableOp
       ...(outsideRange === undefined ? {} : { outsideRange }),
     });
     for (const label of properties.outsideRange) outside.add(label);
-    const uncertainty = uncertaintyOfLog10K(house, temperatureK);
+    const uncertainty = uncertaintyOfLog10K(house, temperatureK, outsideRange);
     lowerBound ||= uncertainty.isLowerBound;
     const cells = [
       [temperatureK, 2],
@@ -91,7 +91,7 @@ export function formatReactionTable(reaction: Reaction, options: ReactionTableOp
     line!,
     ...body,
     "",
-    ...(lowerBound ? ["u: from enthalpies of formation and entropies; >= where a figure has no known u"] : []),
+    ...(lowerBound ? ["u: of formation enthalpies, entropies, transitions; >= where one has no known u"] : []),
     ...(outside.size === 0 ? [] : wrap(`outside their range: ${[...outside].join(", ")}`)),
     ...wrap(caution),
   ].join("\n");
@@ -126,25 +126,18 @@ function checkOptions(options: ReactionTableOptions): CheckedOptions {
 }
 
 /**
- * From the published uncertainties of enthalpies of formation and entropies at 298.15 K, independent of each other;
- * that of the heat capacity is not published with the fits.
+ * From the published uncertainties of enthalpies of formation, entropies at 298.15 K and enthalpies of transition, as
+ * in a ledger; that of the heat capacity is not published with the fits.
  */
 function uncertaintyOfLog10K(
   { terms }: Reaction,
   temperatureK: number,
+  policy: RangePolicy = "refuse",
 ): { readonly value: number; readonly isLowerBound: boolean } {
-  const parts = terms.flatMap(({ coefficient, species: { formationEnthalpy, standardEntropy } }) => {
-    const enthalpy = figureStandardUncertainty(formationEnthalpy);
-    const entropy = figureStandardUncertainty(standardEntropy);
-    return [
-      enthalpy === undefined ? undefined : coefficient * enthalpy,
-      entropy === undefined ? undefined : coefficient * temperatureK * entropy,
-    ];
-  });
-  const known = parts.filter((part) => part !== undefined);
-  const inEnergy = Math.sqrt(exactSum(known.map((part) => part * part)));
+  const entries = terms.flatMap((term) => standardEntries(term, temperatureK, policy));
+  const sum = sumOfEntries(entries.filter(({ datum }) => datum !== undefined));
   return {
-    value: inEnergy / (gasConstantJPerMolK * temperatureK * Math.LN10),
-    isLowerBound: known.length < parts.length,
+    value: (sum.value.standardUncertainty ?? 0) / (gasConstantJPerMolK * temperatureK * Math.LN10),
+    isLowerBound: sum.uncertaintyIsLowerBound,
   };
 }

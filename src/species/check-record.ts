@@ -5,7 +5,7 @@ import { parseLabel } from "../formula/parse-label.js";
 import { checkSeries, seriesKeys } from "../heat-capacity/check-series.js";
 import { carriesConstants } from "../heat-capacity/forms.js";
 import type { PublishedSeries } from "../heat-capacity/published-series.js";
-import { checkFigure } from "../quantity/check-figure.js";
+import { checkFigure, checkUncertainty } from "../quantity/check-figure.js";
 import type { Dimension } from "../quantity/units.js";
 import { checkProvenance, checkSource } from "../references/check-source.js";
 import { checkContinuation } from "./check-continuation.js";
@@ -138,6 +138,7 @@ function checkGibbsFunction(record: Members, path: FaultPath, faults: Fault[]): 
     requireReferenceFigures(record, "a reference point", path, faults);
     return;
   }
+  const before = faults.length;
   const members = checkObject(record["gibbsFunction"], path, faults, {
     required: [...seriesKeys.required, "source", "origin"],
     optional: [...seriesKeys.optional, "where"],
@@ -147,7 +148,6 @@ function checkGibbsFunction(record: Members, path: FaultPath, faults: Fault[]): 
     checkOption(kind, [...path, "kind"], faults, ["series", "reference-point"]);
     return;
   }
-  const before = faults.length;
   checkProvenance(members, path, faults);
   checkSeries(members, path, faults);
   if (faults.length > before) return;
@@ -223,6 +223,8 @@ function checkAgainst(value: unknown, path: FaultPath, faults: Fault[]): void {
     if (members === undefined) continue;
     if (members.value !== undefined) checkNumber(members.value, [...path, name, "value"], faults);
     if (members.unit !== undefined) checkText(members.unit, [...path, name, "unit"], faults);
+    if (members.uncertainty !== undefined)
+      checkUncertainty(members.uncertainty, [...path, name, "uncertainty"], faults);
     checkProvenance(members, [...path, name], faults);
   }
 }
@@ -240,8 +242,8 @@ function checkOver(value: unknown, path: FaultPath, faults: Fault[]): void {
   });
 }
 
-/** The label says the same as formula, charge, state and polymorph. */
-function checkLabel(record: SpeciesRecord, path: FaultPath, faults: Fault[]): void {
+/** Checks that the label of a record says the same as its formula, charge, state and polymorph. */
+export function checkLabel(record: SpeciesRecord, path: FaultPath, faults: Fault[]): void {
   try {
     const parts = parseLabel(record.label);
     const said = { formula: parts.formula, charge: parts.chargeNumber, state: parts.state, polymorph: parts.polymorph };

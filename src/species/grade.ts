@@ -62,7 +62,9 @@ function gradeOf(
 }
 
 function speaksOverRange({ gibbsFunction }: SpeciesRecord, { over }: Witness): boolean {
-  if (gibbsFunction.kind !== "series" || over === undefined) return false;
+  // A reference point reaches no further than 298.15 K, for which every witness speaks.
+  if (gibbsFunction.kind === "reference-point") return true;
+  if (over === undefined) return false;
   const start = gibbsFunction.intervals[0]!.from;
   const end = gibbsFunction.intervals[gibbsFunction.intervals.length - 1]!.to;
   return over[0] <= Math.max(gradedFromK, start) && over[1] >= Math.min(gradedToK, end);

@@ -4,9 +4,10 @@ import { evaluateAll, intervalOf } from "../heat-capacity/evaluate.js";
 import { policyHint, type RangePolicy, rangePolicy } from "../heat-capacity/range-policy.js";
 import { temperatureInKelvin } from "../quantity/guards.js";
 import type { Quantity, Temperature } from "../quantity/quantity.js";
-import { houseRecord } from "./house-record.js";
+import { houseSubstance } from "./house-substance.js";
 import type { Label, SpeciesRecord } from "./record.js";
-import { speciesPlan } from "./species-function.js";
+import type { StableSequence, Substance } from "./substance.js";
+import { substancePlan } from "./substance-function.js";
 
 /** At what temperature, and what to do outside a record's range. */
 export interface StandardConditions {
@@ -35,7 +36,8 @@ const noLabels: readonly Label[] = Object.freeze([]);
  * Heat capacity, enthalpy, entropy and Gibbs energy of one species in its standard state (ideal gas at 1 bar, pure
  * phase at 1 bar) from its published series, with analytic integrals.
  *
- * @param species - a record; one that is not of the house is checked, copied and frozen once
+ * @param species - a record, or a stable sequence as `findSequence` returns it; one that is not of the house is checked,
+ * copied and frozen once
  * @param conditions - temperature above 0 K, within the record's range unless `outsideRange` says otherwise
  * @throws GibbsLedgerError "species/outside-range", "quantity/wrong-dimension", and every fault of a wrong record
  * @remarks Arithmetic: within 4 eps of the sum of the absolute terms of the series.
@@ -45,11 +47,14 @@ const noLabels: readonly Label[] = Object.freeze([]);
  * argon.entropy.value; // => 154.84...
  * argon.heatCapacity?.value; // => 20.78...
  */
-export function standardProperties(species: SpeciesRecord, conditions: StandardConditions): StandardProperties {
-  const record = houseRecord(species, ["species"]);
+export function standardProperties(
+  species: SpeciesRecord | StableSequence,
+  conditions: StandardConditions,
+): StandardProperties {
+  const record = houseSubstance(species, ["species"]);
   const temperatureK = temperatureInKelvin(conditions?.temperature);
   const policy = rangePolicy(conditions.outsideRange);
-  const plan = speciesPlan(record, policy);
+  const plan = substancePlan(record, policy);
   const interval = intervalOf(plan, temperatureK);
   if (interval === undefined) return failOutsideRange(record, temperatureK, ["temperature"]);
   const values = evaluateAll(interval, temperatureK);
@@ -62,25 +67,25 @@ export function standardProperties(species: SpeciesRecord, conditions: StandardC
   };
 }
 
-/** Whether a temperature lies in the range of a record of the house. */
-export function isInRange(record: SpeciesRecord, temperatureK: number): boolean {
-  const plan = speciesPlan(record, "refuse");
+/** Whether a temperature lies in the range of a substance of the house. */
+export function isInRange(substance: Substance, temperatureK: number): boolean {
+  const plan = substancePlan(substance, "refuse");
   return temperatureK >= plan.fromK && temperatureK <= plan.toK;
 }
 
-/** The fault of a temperature outside a record's range. */
-export function failOutsideRange(record: SpeciesRecord, temperatureK: number, path: FaultPath): never {
-  return fail(outsideRangeFault(record, temperatureK, path));
+/** The fault of a temperature outside a substance's range. */
+export function failOutsideRange(substance: Substance, temperatureK: number, path: FaultPath): never {
+  return fail(outsideRangeFault(substance, temperatureK, path));
 }
 
-/** Describes that a temperature lies outside a record's range. */
-export function outsideRangeFault(record: SpeciesRecord, temperatureK: number, path: FaultPath): Fault {
-  const { fromK, toK } = speciesPlan(record, "refuse");
+/** Describes that a temperature lies outside a substance's range. */
+export function outsideRangeFault(substance: Substance, temperatureK: number, path: FaultPath): Fault {
+  const { fromK, toK } = substancePlan(substance, "refuse");
   const range = fromK === toK ? `only at ${fromK} K` : `from ${fromK} K to ${toK} K`;
   return {
     code: "species/outside-range",
     path,
-    message: `${cut(record.label, 40)} is known ${range}, not at ${temperatureK} K`,
+    message: `${cut(substance.label, 40)} is known ${range}, not at ${temperatureK} K`,
     received: `${temperatureK} K`,
     expected: range,
     ...(fromK === toK ? {} : { hint: policyHint }),

@@ -109,7 +109,7 @@ describe("random fits of every form", () => {
 test("G of a pure phase falls with temperature and is concave", () => {
   fc.assert(
     fc.property(
-      fc.constantFrom(...referenceData.species),
+      fc.constantFrom(...referenceData.species.filter(({ gibbsFunction }) => gibbsFunction.kind !== "reference-point")),
       fc.double({ min: 310, max: 1190, noNaN: true }),
       fc.double({ min: 0.5, max: 10, noNaN: true }),
       (record, temperatureK, step) => {

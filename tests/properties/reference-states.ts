@@ -5,6 +5,7 @@ import { virial } from "../../src/fugacity/virial.js";
 import { type RangePolicy, rangePolicies } from "../../src/heat-capacity/range-policy.js";
 import { type Reaction, type ReactionConditions, reaction } from "../../src/reaction/index.js";
 import type { SpeciesRecord } from "../../src/species/record.js";
+import { stateOf } from "../../src/species/substance.js";
 
 /** Equations with gases, solids and a liquid, all of whose gases have critical constants where `real` is set. */
 const equations = [
@@ -43,7 +44,7 @@ export const referenceStates: fc.Arbitrary<ReferenceState> = fc
   })
   .map(({ equation, temperatureK, lnPressure, weights, inerts, model, isGiven, outsideRange }) => {
     const { subject } = equation;
-    const gases = subject.terms.filter(({ species }) => species.state === "g").map(({ label }) => label);
+    const gases = subject.terms.filter(({ species }) => stateOf(species) === "g").map(({ label }) => label);
     const labels = [...gases, ...inerts.map(({ label }) => label)];
     const total = weights.slice(0, labels.length).reduce((sum, weight) => sum + weight, 0);
     const moleFractions = Object.fromEntries(labels.map((label, index) => [label, weights[index]! / total]));

@@ -10,6 +10,7 @@ import {
   standardReactionProperties,
   standardReactionRoundingBound,
 } from "../../src/reaction/index.js";
+import type { SpeciesRecord } from "../../src/species/record.js";
 import { functionNames } from "../heat-capacity/oracle.js";
 import { temperaturesK } from "../heat-capacity/random-series.js";
 import { type RandomTerm, randomTerms, reactionOf } from "../reaction/random-reactions.js";
@@ -76,7 +77,7 @@ describe("random reactions of random records", () => {
         const expected = numbersOf(subject, temperatureK);
         expect(numbersOf(structuredClone(subject), temperatureK)).toEqual(expected);
         expect(numbersOf(JSON.parse(JSON.stringify(subject)) as Reaction, temperatureK)).toEqual(expected);
-        const species = subject.terms.map((term) => structuredClone(term.species));
+        const species = subject.terms.map((term) => structuredClone(term.species as SpeciesRecord));
         expect(numbersOf(reaction(subject.equation, { species }), temperatureK)).toEqual(expected);
       }),
       { ...runs, numRuns: 100 },

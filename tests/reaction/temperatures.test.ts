@@ -168,6 +168,15 @@ describe("a search that is wrong", () => {
       ["quantity/wrong-dimension at gibbsEnergy.unit"],
     ],
     ["another policy", { ...between(300, 500), outsideRange: "go on" }, ["input/unknown-option at outsideRange"]],
+    [
+      "a policy beside conditions, which have their own",
+      {
+        ...between(300, 500),
+        outsideRange: "continue-fit",
+        conditions: { pressure: { value: 1, unit: "bar" }, outsideRange: "refuse" },
+      },
+      ["input/conflicting-options at outsideRange"],
+    ],
     ["null as conditions", { ...between(300, 500), conditions: null }, ["input/not-an-object at conditions"]],
     ["conditions without a pressure", { ...between(300, 500), conditions: {} }, ["input/missing at pressure"]],
     ["an unknown key", { ...between(300, 500), target: 1 }, ["input/unknown-key at target"]],
@@ -176,6 +185,7 @@ describe("a search that is wrong", () => {
       { between: [kelvin(0), 5], gibbsEnergy: 1, outsideRange: 1, conditions: 1 },
       [
         "input/not-an-object at conditions",
+        "input/conflicting-options at outsideRange",
         "input/unknown-option at outsideRange",
         "quantity/not-a-quantity at gibbsEnergy",
         "quantity/not-positive at between.0.value",

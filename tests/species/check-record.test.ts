@@ -112,6 +112,11 @@ describe("a wrong record is refused", () => {
       ["input/missing at gibbsFunction.intervals"],
     ],
     [
+      "a fit without a form",
+      { ...base, gibbsFunction: { ...base.gibbsFunction, form: undefined } },
+      ["input/missing at gibbsFunction.form"],
+    ],
+    [
       "another kind of Gibbs function",
       { ...base, gibbsFunction: { ...base.gibbsFunction, kind: "fit" } },
       ["input/unknown-option at gibbsFunction.kind"],
@@ -183,6 +188,19 @@ describe("a wrong record is refused", () => {
       "a witness against no figures",
       { ...base, witnesses: [{ ...witness, against: { value: 1 } }] },
       ["input/not-an-object at witnesses.0.against.value"],
+    ],
+    [
+      "a witness against a figure of coverage 95",
+      {
+        ...base,
+        witnesses: [
+          { ...witness, against: { x: { ...figure(1, "J/mol"), uncertainty: { halfWidth: -1, coverage: 95 } } } },
+        ],
+      },
+      [
+        "quantity/negative-uncertainty at witnesses.0.against.x.uncertainty.halfWidth",
+        "input/unknown-option at witnesses.0.against.x.uncertainty.coverage",
+      ],
     ],
     [
       "a witness about no numbers",

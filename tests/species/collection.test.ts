@@ -1,6 +1,7 @@
 import { describe, expect, test } from "vitest";
 import { referenceData } from "../../src/data/reference-data.js";
-import { findSpecies, recordOfLabel, speciesCollection } from "../../src/species/collection.js";
+import { findSpecies, speciesCollection } from "../../src/species/collection.js";
+import { recordOfLabel } from "../../src/species/collection-index.js";
 import type { CollectionData } from "../../src/species/record.js";
 import { faultsOf, placesOf } from "../errors/faults-of.js";
 import { invented } from "../heat-capacity/random-series.js";
@@ -32,8 +33,8 @@ describe.each([
   test("a formula of several phases lists the choices", () => {
     const [fault] = faultsOf(() => findSpecies(data, "H2O"));
     expect(fault).toMatchObject({ code: "species/ambiguous", path: [], received: "H2O" });
-    expect(fault?.expected?.split(", ").sort()).toEqual(["H2O(g)", "H2O(l)"]);
-    expect(fault?.hint).toMatch(/^name the phase, such as H2O\((g|l)\)$/);
+    expect(fault?.expected?.split(", ").sort()).toEqual(["H2O(cr)", "H2O(g)", "H2O(l)"]);
+    expect(fault?.hint).toMatch(/^name the phase, such as H2O\((g|l|cr)\)$/);
   });
 
   test.each([
@@ -78,8 +79,8 @@ test("a label is looked up as it stands", () => {
 
 describe("a collection", () => {
   test("is frozen to the depth, sequences too", () => {
-    const sequences = [{ label: "Fe(cr)", phases: ["Fe(cr,alpha)"], source: invented, origin: "memory" as const }];
-    const house = speciesCollection({ species: [iron], sequences });
+    const sequences = [{ label: "Fe(cr)", phases: ["Fe(cr)"], source: invented, origin: "memory" as const }];
+    const house = speciesCollection({ species: [recordOf("Fe(cr)")], sequences });
     expect(Object.isFrozen(house)).toBe(true);
     expect(Object.isFrozen(house.species)).toBe(true);
     expect(Object.isFrozen(house.species[0]?.witnesses)).toBe(true);
@@ -116,6 +117,7 @@ describe("a collection", () => {
       "input/unknown-option at collection.species.2.state",
       "input/not-an-object at collection.species.3",
       "input/not-an-array at collection.sequences",
+      "species/duplicate-label at collection.species.2.label",
     ]);
   });
 

@@ -1,6 +1,6 @@
 import { describe, expect, test } from "vitest";
 import { CaCO3_cr_calcite, N2_g, referenceData } from "../../src/data/index.js";
-import { standardProperties } from "../../src/species/standard-properties.js";
+import { isInRange, standardProperties } from "../../src/species/standard-properties.js";
 import { faultsOf } from "../errors/faults-of.js";
 import { figure } from "../heat-capacity/random-series.js";
 import { fitted, polynomialRecord, recordOf } from "./records.js";
@@ -8,7 +8,13 @@ import { fitted, polynomialRecord, recordOf } from "./records.js";
 const kelvin = (value: number) => ({ value, unit: "K" }) as const;
 
 describe("at 298.15 K the reference data give their own figures", () => {
-  test.each(referenceData.species.map((record) => [record.label, record] as const))("%s", (_label, record) => {
+  // Phases of higher temperatures do not reach down to it.
+  const known = referenceData.species.filter((record) => isInRange(record, 298.15));
+  test("most of them reach it", () => {
+    expect(known.length).toBeGreaterThan(0.85 * referenceData.species.length);
+  });
+
+  test.each(known.map((record) => [record.label, record] as const))("%s", (_label, record) => {
     const properties = standardProperties(record, { temperature: kelvin(298.15) });
     const { formationEnthalpy, standardEntropy } = record;
     // Other compilations than that of the fit: 0.1 kJ/mol and 0.1 J/mol/K are the coarsest of their uncertainties.
