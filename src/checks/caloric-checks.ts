@@ -2,6 +2,7 @@ import { gasConstantJPerMolK, referenceTemperatureK } from "../constants/constan
 import { exactPropertiesAt, readSeries } from "../heat-capacity/read-series.js";
 import { decimalToNumber, subtractDecimals } from "../numeric/exact-decimal.js";
 import type { SpeciesRecord, Witness } from "../species/record.js";
+import { standardPressureEntropy } from "../species/species-function.js";
 import { largest } from "./largest.js";
 import { readMolecularConstants } from "./molecular-constants.js";
 import { molecularFunctions } from "./molecular-functions.js";
@@ -33,17 +34,29 @@ export function closureAtBreaks(record: SpeciesRecord, witness: Witness): number
   return largest(steps);
 }
 
-/** S(298.15 K) of the fit less the record's figure, or less the `standardEntropy` compared with; J/mol/K. */
+/**
+ * S(298.15 K) of the fit less the record's figure, brought from its standard pressure to 1 bar, or less the
+ * `standardEntropy` at 1 bar compared with; J/mol/K.
+ */
 export function entropyAtReference(record: SpeciesRecord, witness: Witness): number {
-  const expected =
-    optionalInput(witness, "standardEntropy") ??
-    requiredFigure(record, witness.check, "standardEntropy", record.standardEntropy);
+  const expected = optionalInput(witness, "standardEntropy") ?? ownEntropy(record, witness);
   return propertiesOf(record, referenceTemperatureK).entropy - expected;
+}
+
+function ownEntropy(record: SpeciesRecord, { check }: Witness): number {
+  const shift = standardPressureEntropy(record);
+  const printed = requiredFigure(record, check, "standardEntropy", record.standardEntropy);
+  return printed + (shift === undefined ? 0 : decimalToNumber(shift));
 }
 
 /** The largest deviation of Cp from the rows of a table, named as "500 K"; J/mol/K. */
 export function tabulatedHeatCapacity(record: SpeciesRecord, witness: Witness): number {
-  return largestOfRows(record, witness, (temperatureK) => propertiesOf(record, temperatureK).heatCapacity);
+  return largestOfRows(
+    record,
+    witness,
+    (temperatureK) =>
+      propertiesOf(record, temperatureK).heatCapacity ?? missing(record, witness.check, "a heat capacity"),
+  );
 }
 
 /** The largest deviation of S from the rows of a table, named as "500 K"; J/mol/K. */

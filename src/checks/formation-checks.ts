@@ -2,10 +2,14 @@ import { gasConstantJPerMolK, referenceTemperatureK, standardPressurePa } from "
 import { exp } from "../numeric/exp.js";
 import { log } from "../numeric/log.js";
 import { log10 } from "../numeric/log10.js";
+import { quantity } from "../quantity/quantity.js";
+import { formationProperties } from "../species/formation-properties.js";
 import type { CollectionData, SpeciesRecord, Witness } from "../species/record.js";
+import { formationGibbsEnergyAtStandardPressure } from "../standard-state/formation-pressure.js";
 import { rowsByTemperature } from "./caloric-checks.js";
 import { largest } from "./largest.js";
 import { propertiesOf } from "./properties-of.js";
+import { gasesFormed, sumOver, termsOf } from "./reaction-terms.js";
 import { missing, optionalInput, requiredFigure, requiredInput } from "./witness-inputs.js";
 
 /** H(298.15 K) of the fit less the record's formation enthalpy, or the `formationEnthalpy` compared with; J/mol. */
@@ -16,13 +20,45 @@ export function enthalpyAtReference(record: SpeciesRecord, witness: Witness): nu
   return propertiesOf(record, referenceTemperatureK).enthalpy - expected;
 }
 
-/** Enthalpy of a reaction at 298.15 K less the measured `reactionEnthalpy`; J/mol. */
+/** Enthalpy of a reaction at 298.15 K, or at `temperature`, less the measured `reactionEnthalpy`; J/mol. */
 export function reactionEnthalpy(record: SpeciesRecord, witness: Witness, collection: CollectionData): number {
+  const temperatureK = optionalInput(witness, "temperature") ?? referenceTemperatureK;
   const computed = sumOver(
     termsOf(record, witness, collection),
-    (species) => propertiesOf(species, referenceTemperatureK).enthalpy,
+    (species) => propertiesOf(species, temperatureK).enthalpy,
   );
   return computed - requiredInput(record, witness, "reactionEnthalpy");
+}
+
+/** Entropy of a reaction at 298.15 K less the measured `reactionEntropy`; J/mol/K. */
+export function reactionEntropy(record: SpeciesRecord, witness: Witness, collection: CollectionData): number {
+  const computed = sumOver(
+    termsOf(record, witness, collection),
+    (species) => propertiesOf(species, referenceTemperatureK).entropy,
+  );
+  return computed - requiredInput(record, witness, "reactionEntropy");
+}
+
+/**
+ * Gibbs energy of formation at 298.15 K from the record's enthalpy and entropy and the entropies of the elements, with
+ * half that of H2(g) for each charge of an ion, less the record's own, which refers to the record's standard pressure, or
+ * the `formationGibbsEnergy` compared with, at `standardPressure` or at 1 bar; J/mol.
+ */
+export function formationGibbsEnergy(record: SpeciesRecord, witness: Witness, collection: CollectionData): number {
+  const compared = optionalInput(witness, "formationGibbsEnergy");
+  const expected =
+    compared ?? requiredFigure(record, witness.check, "formationGibbsEnergy", record.formationGibbsEnergy);
+  const pressurePa =
+    compared === undefined
+      ? requiredFigure(record, witness.check, "standardPressure", record.standardPressure)
+      : (optionalInput(witness, "standardPressure") ?? standardPressurePa);
+  const temperature = quantity(referenceTemperatureK, "K");
+  const atBar = formationGibbsEnergyAtStandardPressure(quantity(expected, "J/mol"), record, {
+    temperature,
+    from: quantity(pressurePa, "Pa"),
+    to: quantity(standardPressurePa, "Pa"),
+  });
+  return formationProperties(record, { temperature }, collection).gibbsEnergy.value - atBar.value;
 }
 
 /** Enthalpy of dissociation at 0 K from H(298.15 K) and H(298.15 K) - H(0 K), less `dissociationEnergy`; J/mol. */
@@ -37,13 +73,14 @@ export function dissociationEnergy(record: SpeciesRecord, witness: Witness, coll
 }
 
 /**
- * log10 K of a reaction of ideal gases and pure phases less measured values, the largest over rows named as "700 K".
- * `unitPressure` is the unit in which the measured K has its partial pressures.
+ * log10 K of a reaction less measured values, the largest over rows named as "700 K": ideal gases, pure phases, and
+ * solutes on the scale of molality with the standard state of 1 mol/kg. `unitPressure` is the unit in which the measured
+ * K has its partial pressures; where no gas is formed or consumed on balance, none is needed.
  */
 export function equilibriumConstant(record: SpeciesRecord, witness: Witness, collection: CollectionData): number {
   const terms = termsOf(record, witness, collection);
-  const gases = sumOver(terms, (species) => (species.state === "g" ? 1 : 0));
-  const shift = gases * log10(requiredInput(record, witness, "unitPressure") / standardPressurePa);
+  const gases = gasesFormed(terms);
+  const shift = gases === 0 ? 0 : gases * log10(requiredInput(record, witness, "unitPressure") / standardPressurePa);
   const perDecade = gasConstantJPerMolK * log(10);
   return largest(
     rowsByTemperature(record, witness).map(([temperatureK, measured]) => {
@@ -75,19 +112,4 @@ export function equilibriumPressure(record: SpeciesRecord, witness: Witness, col
       return (standardPressurePa / measuredPa) * exp(lnRatio) - 1;
     }),
   );
-}
-
-type Term = readonly [species: SpeciesRecord, stoichiometricNumber: number];
-
-function termsOf(record: SpeciesRecord, witness: Witness, collection: CollectionData): Term[] {
-  const entries = Object.entries(witness.reaction ?? {});
-  if (entries.length === 0) return missing(record, witness.check, "a reaction");
-  return entries.map(([label, stoichiometricNumber]) => {
-    const species = label === record.label ? record : collection.species.find((other) => other.label === label);
-    return [species ?? missing(record, witness.check, `a record of ${label}`), stoichiometricNumber];
-  });
-}
-
-function sumOver(terms: readonly Term[], property: (species: SpeciesRecord) => number): number {
-  return terms.reduce((sum, [species, stoichiometricNumber]) => sum + stoichiometricNumber * property(species), 0);
 }

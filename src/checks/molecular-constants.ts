@@ -1,4 +1,6 @@
 import type { SpeciesRecord, Witness } from "../species/record.js";
+import type { HinderedRotor } from "./hindered-rotor.js";
+import { unsoundConstants } from "./unsound-constants.js";
 import { missing, optionalInput, requiredInput } from "./witness-inputs.js";
 
 /** Constants of one molecule, energies as wavenumbers in cm-1. */
@@ -11,6 +13,8 @@ export interface MolecularConstants {
   /** None of an atom, one of a linear molecule, three of any other. */
   readonly rotation: readonly number[];
   readonly vibrations: readonly { readonly wavenumber: number; readonly degeneracy: number }[];
+  /** Internal rotors, each by itself, in place of a torsional vibration. */
+  readonly rotors?: readonly HinderedRotor[];
   /** Present for diatomic molecules, whose levels are summed one by one. */
   readonly diatomic?: {
     readonly anharmonicity: number;
@@ -32,12 +36,16 @@ const rotationFactor = 16.857629206;
  * Names: `molarMass`, `symmetryNumber`; `level0Degeneracy`, `level1`, `level1Degeneracy`, ...; `rotation1` to
  * `rotation3`, or `bondLength` with `atomicMass1` and `atomicMass2`; `vibration1`, `vibration1Degeneracy`, ...; of a
  * diatomic molecule also `anharmonicity`, `rotationVibration`, `centrifugalDistortion`,
- * `evenRotationWeight` and `oddRotationWeight`, `spinOrbit`. A degeneracy or
- * symmetry number that is not given is 1.
+ * `evenRotationWeight` and `oddRotationWeight`, `spinOrbit`; of an internal rotor `rotor1Barrier`, `rotor1Constant`,
+ * `rotor1Fold`, `rotor1SymmetryNumber`, .... A degeneracy or symmetry number that is not given is 1.
  *
  * @throws GibbsLedgerError "checks/no-inputs"
  */
 export function readMolecularConstants(record: SpeciesRecord, witness: Witness): MolecularConstants {
+  const unsound = unsoundConstants(witness);
+  if (unsound.length > 0) {
+    return missing(record, witness.check, `constants that a molecule may have, unlike ${unsound.join(", ")}`);
+  }
   const molarMass = requiredInput(record, witness, "molarMass") * 1000;
   const symmetryNumber = optionalInput(witness, "symmetryNumber") ?? 1;
   const levels = [
@@ -47,8 +55,10 @@ export function readMolecularConstants(record: SpeciesRecord, witness: Witness):
   const vibrations = numbered(witness, "vibration");
   const bondLength = optionalInput(witness, "bondLength");
   const rotation = bondLength === undefined ? rotations(witness) : [fromBondLength(record, witness, bondLength)];
+  if (rotation.length === 2) return missing(record, witness.check, "none, one or three rotational constants");
   const anharmonicity = optionalInput(witness, "anharmonicity");
-  const base = { molarMass, symmetryNumber, levels, rotation, vibrations };
+  const rotors = internalRotors(record, witness);
+  const base = { molarMass, symmetryNumber, levels, rotation, vibrations, ...(rotors.length === 0 ? {} : { rotors }) };
   if (anharmonicity === undefined) return base;
   if (rotation.length !== 1 || vibrations.length !== 1) {
     return missing(record, witness.check, "one rotational constant and one vibration of a diatomic molecule");
@@ -75,6 +85,20 @@ function numbered(witness: Witness, name: string): { wavenumber: number; degener
     const wavenumber = optionalInput(witness, `${name}${index}`);
     if (wavenumber === undefined) return found;
     found.push({ wavenumber, degeneracy: optionalInput(witness, `${name}${index}Degeneracy`) ?? 1 });
+  }
+}
+
+function internalRotors(record: SpeciesRecord, witness: Witness): HinderedRotor[] {
+  const found: HinderedRotor[] = [];
+  for (let index = 1; ; index += 1) {
+    const barrier = optionalInput(witness, `rotor${index}Barrier`);
+    if (barrier === undefined) return found;
+    found.push({
+      barrier,
+      constant: requiredInput(record, witness, `rotor${index}Constant`),
+      fold: requiredInput(record, witness, `rotor${index}Fold`),
+      symmetryNumber: optionalInput(witness, `rotor${index}SymmetryNumber`) ?? 1,
+    });
   }
 }
 

@@ -1,6 +1,7 @@
 import { gasConstantJPerMolK } from "../constants/constants.js";
 import { exp } from "../numeric/exp.js";
 import { log } from "../numeric/log.js";
+import { type HinderedRotor, hinderedRotorLevels } from "./hindered-rotor.js";
 import type { MolecularConstants } from "./molecular-constants.js";
 
 /** Entropy at 1 bar and enthalpy above the lowest level of an ideal gas. */
@@ -27,7 +28,8 @@ interface Part {
 /**
  * Ideal-gas functions from molecular constants: Sackur-Tetrode translation; atoms by their levels; diatomic molecules
  * by direct sums over vibrational and rotational levels (Hill and Van Vleck for doublet Pi states); other molecules as
- * rigid rotors with the first quantum correction and harmonic oscillators at the fundamentals.
+ * rigid rotors with the first quantum correction, harmonic oscillators at the fundamentals, and internal rotors in
+ * cosine potentials of their own.
  *
  * Nuclear spin is left out. Each electronic level of a diatomic molecule above the ground level shares its rotation
  * and vibration.
@@ -41,7 +43,12 @@ interface Part {
 export function molecularFunctions(constants: MolecularConstants, temperatureK: number): MolecularFunctions {
   const parts =
     constants.diatomic === undefined
-      ? [electronic(constants, temperatureK), rotational(constants, temperatureK), vibrational(constants, temperatureK)]
+      ? [
+          electronic(constants, temperatureK),
+          rotational(constants, temperatureK),
+          vibrational(constants, temperatureK),
+          ...(constants.rotors ?? []).map((rotor) => torsional(rotor, temperatureK)),
+        ]
       : [electronic(constants, temperatureK), diatomicPart(constants, constants.diatomic, temperatureK)];
   const translation = sackurTetrodeConstant + 2.5 * log(temperatureK) + 1.5 * log(constants.molarMass);
   let entropy = translation;
@@ -91,6 +98,15 @@ function vibrational({ vibrations }: MolecularConstants, temperatureK: number): 
     energy += (degeneracy * x * factor) / (1 - factor);
   }
   return { lnPartition, energy };
+}
+
+function torsional(rotor: HinderedRotor, temperatureK: number): Part {
+  const energies = hinderedRotorLevels(rotor, (highestLevel * temperatureK) / secondRadiationConstant);
+  const weight = 1 / rotor.symmetryNumber;
+  return sumOfLevels(
+    energies.map((energy) => [energy, weight]),
+    temperatureK,
+  );
 }
 
 function diatomicPart(

@@ -1,14 +1,14 @@
 import { quantity } from "../quantity/quantity.js";
 import type { SpeciesRecord } from "../species/record.js";
 import { standardProperties } from "../species/standard-properties.js";
-import { missing } from "./witness-inputs.js";
 
 /** Standard properties as doubles in J/mol and J/mol/K. */
 export function propertiesOf(
   record: SpeciesRecord,
   temperatureK: number,
 ): {
-  readonly heatCapacity: number;
+  /** Absent where the record publishes H and S at 298.15 K only. */
+  readonly heatCapacity: number | undefined;
   readonly enthalpy: number;
   readonly entropy: number;
   readonly gibbsEnergy: number;
@@ -17,7 +17,7 @@ export function propertiesOf(
     temperature: quantity(temperatureK, "K"),
   });
   return {
-    heatCapacity: heatCapacity?.value ?? missing(record, "tabulated-heat-capacity", "a heat capacity"),
+    heatCapacity: heatCapacity?.value,
     enthalpy: enthalpy.value,
     entropy: entropy.value,
     gibbsEnergy: gibbsEnergy.value,

@@ -1,11 +1,12 @@
+import { describeReceived } from "../errors/fault.js";
 import { fail } from "../errors/gibbs-ledger-error.js";
 import type { Figure } from "../quantity/figure.js";
 import { figureInSi } from "../quantity/figure-value.js";
 import { isUnitCode } from "../quantity/units.js";
 import type { SpeciesRecord, Witness } from "../species/record.js";
 
-/** Units of molecular and crystal constants, which no Quantity carries, with their factors to the unit of the check. */
-const spectroscopicUnits: Readonly<Record<string, number>> = { "cm-1": 1, Ao: 1, "g/cm3": 1 };
+/** Units of molecules, crystals and cells that quantities need not know, with factors to the unit of the check. */
+const unitsOfChecks: Readonly<Record<string, number>> = { "cm-1": 1, Ao: 1, "g/cm3": 1, "mV/K": 0.001 };
 
 /** A figure that the witness compares with, in coherent SI units; cm-1, Ao and g/cm3 stay as printed. */
 export function optionalInput(witness: Witness, name: string): number | undefined {
@@ -44,7 +45,15 @@ export function missing(record: SpeciesRecord, check: Witness["check"], what: st
 }
 
 function numberOf(figure: Figure): number {
-  const factor = spectroscopicUnits[figure.unit];
+  if (!Number.isFinite(figure?.value)) {
+    return fail({
+      code: "input/not-finite",
+      path: ["against"],
+      message: `a check compares with a finite number, got ${describeReceived(figure?.value)}`,
+      received: describeReceived(figure?.value),
+    });
+  }
+  const factor = unitsOfChecks[figure.unit];
   if (factor !== undefined) return figure.value * factor;
   if (isUnitCode(figure.unit)) return figureInSi(figure);
   return fail({

@@ -467,13 +467,15 @@ describe("no result is NaN, infinite or a negative zero", () => {
 
   const extremes = [1, 1.0000001, 199, 200, 298.15, 1000, 6000, 99_999, 100_000];
   const policies = ["constant-heat-capacity", "continue-fit"] as const;
+  // A figure at 298.15 K stays one under every policy.
+  const fitted = referenceData.species.filter(({ gibbsFunction }) => gibbsFunction.kind === "series");
   const calls = policies.flatMap((outsideRange) =>
     extremes.map((value) => [`${outsideRange} at ${value} K`, { ...at(K(value)), outsideRange }] as const),
   );
 
   test.each(calls)("%s", (_name, conditions) => {
     const results = [
-      ...referenceData.species.map((record) => standardProperties(record, conditions)),
+      ...fitted.map((record) => standardProperties(record, conditions)),
       standardReactionProperties(synthesis, conditions),
       standardReactionRoundingBound(synthesis, "gibbsEnergy", conditions),
       ledger(synthesis, { ...state, ...conditions }),

@@ -6,6 +6,7 @@ import { reaction } from "../../src/reaction/reaction.js";
 import { reactionGibbsEnergy } from "../../src/reaction/reaction-gibbs-energy.js";
 import { standardReactionProperties } from "../../src/reaction/standard-reaction.js";
 import { temperaturesAtGibbsEnergy } from "../../src/reaction/temperatures.js";
+import { formulaOf } from "../../src/species/substance.js";
 import { type AccuracyRow, row } from "./accuracy-row.js";
 import { gasConstantTimesLn10, slug, spreadOfReaction, tidy } from "./combined-uncertainty.js";
 
@@ -114,7 +115,7 @@ function moranShapiroRows(): AccuracyRow[] {
 function janafSumRows(): AccuracyRow[] {
   return Object.entries(janafCombinations).flatMap(([equation, values]) => {
     const subject = reaction(equation, referenceData);
-    const summands = subject.terms.filter(({ species: { formula } }) => !["H2", "O2", "N2", "C"].includes(formula));
+    const summands = subject.terms.filter(({ species }) => !["H2", "O2", "N2", "C"].includes(formulaOf(species)!));
     const rounding = summands.reduce((sum, { coefficient }) => sum + 0.0005 * Math.abs(coefficient), 0);
     return Object.entries(values).map(([key, printed]) => {
       const temperatureK = Number(key);

@@ -1,0 +1,113 @@
+import type { SpeciesRecord } from "../species/record.js";
+
+/** Water ice, hexagonal crystal. */
+export const H2O_cr: SpeciesRecord = {
+  label: "H2O(cr)",
+  name: "ice",
+  formula: "H2O",
+  chargeNumber: 0,
+  state: "cr",
+  casNumber: "7732-18-5",
+  standardPressure: { value: 1, unit: "bar", source: "mcbride2002", origin: "memory" },
+  gibbsFunction: {
+    kind: "series",
+    form: "nine-coefficient",
+    gasConstant: 8.31451,
+    intervals: [
+      {
+        from: 200,
+        to: 273.15,
+        coefficients: [
+          -402677.748, 2747.887946, 57.3833663, -0.826791524, 0.00441308798, -1.054251164e-5, 9.69449597e-9,
+          -55303.1499, -190.2572063,
+        ],
+        endsAt: "fit",
+      },
+    ],
+    source: "mcbride2002",
+    origin: "memory",
+    where: "gas constant 8.314510 J/mol/K",
+  },
+  transitions: [
+    {
+      temperature: { value: 273.15, unit: "K", source: "prestonthomas1990", origin: "memory" },
+      into: "H2O(l)",
+      enthalpy: { value: 1.4357, unit: "kcal_th/mol", source: "giauque1936", origin: "memory" },
+    },
+  ],
+  volume: { molar: { value: 19.65, unit: "cm3/mol", source: "feistel2006", origin: "memory" } },
+  witnesses: [
+    {
+      group: "caloric",
+      kind: "physical",
+      check: "tabulated-heat-capacity",
+      against: {
+        "273.15 K": { value: 37.773, unit: "J/mol/K", source: "feistel2006", origin: "memory", where: "2.0967 J/g/K" },
+      },
+      deviation: 0.3399,
+      tolerance: 0.38,
+      over: [273.15, 273.15],
+      source: "feistel2006",
+    },
+    {
+      group: "caloric",
+      kind: "physical",
+      check: "transition-enthalpy",
+      against: {
+        transitionTemperature: { value: 273.15, unit: "K", source: "prestonthomas1990", origin: "memory" },
+        transitionEnthalpy: { value: 1.4357, unit: "kcal_th/mol", source: "giauque1936", origin: "memory" },
+      },
+      reaction: { "H2O(cr)": -1, "H2O(l)": 1 },
+      deviation: 2.978,
+      tolerance: 5,
+      over: [273.15, 273.15],
+      source: "giauque1936",
+    },
+    {
+      group: "caloric",
+      kind: "transcription",
+      check: "transition-gibbs-energy",
+      against: { transitionTemperature: { value: 273.15, unit: "K", source: "prestonthomas1990", origin: "memory" } },
+      reaction: { "H2O(cr)": -1, "H2O(l)": 1 },
+      deviation: -0.6173,
+      tolerance: 1,
+      over: [273.15, 273.15],
+      source: "prestonthomas1990",
+    },
+    {
+      group: "formation",
+      kind: "physical",
+      check: "transition-temperature",
+      against: { transitionTemperature: { value: 273.15, unit: "K", source: "prestonthomas1990", origin: "memory" } },
+      reaction: { "H2O(cr)": -1, "H2O(l)": 1 },
+      deviation: -0.02805,
+      tolerance: 0.05,
+      over: [273.15, 273.15],
+      source: "prestonthomas1990",
+    },
+    {
+      group: "formation",
+      kind: "physical",
+      check: "equilibrium-pressure",
+      against: { "230 K": { value: 8.94735, unit: "Pa", source: "wagner2011", origin: "memory" } },
+      reaction: { "H2O(cr)": -1, "H2O(g)": 1 },
+      deviation: 0.001057,
+      tolerance: 0.01,
+      over: [230, 230],
+      source: "wagner2011",
+    },
+    {
+      group: "volume",
+      kind: "physical",
+      check: "unit-cell-volume",
+      against: {
+        cellEdgeA: { value: 4.5227, unit: "Ao", source: "laplaca1960", origin: "memory" },
+        cellEdgeC: { value: 7.3671, unit: "Ao", source: "laplaca1960", origin: "memory" },
+        formulaUnits: { value: 4, unit: "1", source: "laplaca1960", origin: "memory" },
+      },
+      deviation: -0.0001126,
+      tolerance: 0.002,
+      source: "laplaca1960",
+    },
+  ],
+};
