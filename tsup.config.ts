@@ -3,12 +3,13 @@ import { dirname, join, posix } from "node:path";
 import { transformSync } from "esbuild";
 import { defineConfig } from "tsup";
 import ts from "typescript";
+import { jsonSchemaFiles } from "./src/exchange/json-schema.js";
 
 // One entry for each sub-path of the exports map, named as the map names its files; rooms are folders or single files.
 const manifest: { exports: Record<string, unknown> } = JSON.parse(readFileSync("package.json", "utf8"));
 const entry: Record<string, string> = {};
 for (const subPath of Object.keys(manifest.exports)) {
-  if (subPath === "./package.json") continue;
+  if (subPath.endsWith(".json")) continue;
   const name = subPath === "." ? "index" : subPath.slice(2);
   const file = [`src/${name}.ts`, `src/${name}/index.ts`].find((candidate) => existsSync(candidate));
   if (file === undefined) throw new Error(`the exports map names ${subPath}, which src does not have`);
@@ -31,6 +32,7 @@ export default defineConfig({
   onSuccess: async () => {
     writeCommonJs();
     writeDeclarations(Object.values(entry));
+    writeJsonSchemas();
   },
 });
 
@@ -47,6 +49,13 @@ function writeCommonJs(): void {
     );
     const { code: commonJs } = transformSync(code, { format: "cjs", target: "es2022", sourcefile: name });
     writeFileSync(join("dist", name.replace(/\.js$/, ".cjs")), commonJs);
+  }
+}
+
+/** Writes what other languages and editors read: the shape of records and collections. */
+function writeJsonSchemas(): void {
+  for (const [name, schema] of Object.entries(jsonSchemaFiles())) {
+    writeFileSync(join("dist", name), `${JSON.stringify(schema, null, 2)}\n`);
   }
 }
 

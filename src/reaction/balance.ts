@@ -58,7 +58,7 @@ export type Balance = UniqueBalance | AmbiguousBalance;
  * balance("KMnO4 + HCl = KCl + MnCl2 + H2O + Cl2").equation;
  * // => "2 KMnO4 + 16 HCl = 2 KCl + 2 MnCl2 + 8 H2O + 5 Cl2"
  * balance({ reactants: ["Fe^2+(aq)", "MnO4^-(aq)", "H^+(aq)"], products: ["Fe^3+(aq)", "Mn^2+(aq)", "H2O(l)"] })
- *   .coefficients; // => { "Fe^2+(aq)": "-5", "MnO4^-(aq)": "-1", "H^+(aq)": "-8" }
+ *   .coefficients; // => { "Fe^2+(aq)": "-5", "MnO4^-(aq)": "-1", "H^+(aq)": "-8", ... }
  * balance("H2 + Fe2O3 = Fe + CO2"); // throws reaction/not-balanceable
  */
 export function balance(equation: string | UnbalancedEquation, collection?: CollectionData): Balance {

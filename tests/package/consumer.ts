@@ -7,11 +7,11 @@ import { inject } from "vitest";
 /** The project itself. */
 export const root: string = fileURLToPath(new URL("../..", import.meta.url));
 
-/** Each sub-path of the exports map but package.json: "", "/errors", ... */
+/** Each sub-path of the exports map but JSON files: "", "/errors", ... */
 export const subPaths: readonly string[] = Object.keys(
   (JSON.parse(readFileSync(join(root, "package.json"), "utf8")) as { exports: Record<string, unknown> }).exports,
 )
-  .filter((subPath) => subPath !== "./package.json")
+  .filter((subPath) => !subPath.endsWith(".json"))
   .map((subPath) => subPath.slice(1));
 
 /** Writes a file in the consumer's folder; returns its path. */

@@ -62,6 +62,41 @@ test("a reaction of one copy of the package, or out of JSON, is accepted by anot
   expect(others).toEqual([own, own, own]);
 });
 
+test("what one copy of the package wrote as JSON, the readers of both read with the same bits", () => {
+  const script = `
+    import { createRequire } from "node:module";
+    import { reaction } from "gibbs-ledger";
+    import { referenceData } from "gibbs-ledger/data";
+    import { readCollection, readReaction } from "gibbs-ledger/exchange";
+    const other = createRequire(import.meta.url)("gibbs-ledger/exchange");
+    const data = JSON.stringify(referenceData);
+    const synthesis = JSON.stringify(reaction("N2(g) + 3 H2(g) = 2 NH3(g)", referenceData));
+    const read = [readCollection(data), other.readCollection(data), other.readCollection(readCollection(data))];
+    const reactions = [readReaction(synthesis), other.readReaction(synthesis), readReaction(other.readReaction(synthesis))];
+    console.log(JSON.stringify([
+      read.map((collection) => JSON.stringify(collection) === data),
+      reactions.map((subject) => JSON.stringify(subject) === synthesis),
+    ]));
+  `;
+  expect(runScript("exchange.mjs", script)).toEqual([
+    [true, true, true],
+    [true, true, true],
+  ]);
+});
+
+test("the JSON Schema files are read by their names", () => {
+  const script = `
+    import record from "gibbs-ledger/species-record.schema.json" with { type: "json" };
+    import { createRequire } from "node:module";
+    const collection = createRequire(import.meta.url)("gibbs-ledger/species-collection.schema.json");
+    console.log(JSON.stringify([record.$id, collection.$id]));
+  `;
+  expect(runScript("schema-files.mjs", script)).toEqual([
+    "species-record.schema.json",
+    "species-collection.schema.json",
+  ]);
+});
+
 test("an error of one copy is recognised by the other", () => {
   const script = `
     import { createRequire } from "node:module";

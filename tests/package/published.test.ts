@@ -23,7 +23,7 @@ test("the tarball holds dist, the documents of the package, and nothing else", (
   const folder = join(inject("consumer"), "node_modules/gibbs-ledger");
   expect(readdirSync(folder).sort()).toEqual(["CHANGELOG.md", "LICENSE", "README.md", "dist", "package.json"]);
   const files = filesOf(join(folder, "dist"));
-  expect(files.filter((name) => !/\.(?:js|cjs|d\.ts|d\.cts|js\.map)$/.test(name))).toEqual([]);
+  expect(files.filter((name) => !/\.(?:js|cjs|d\.ts|d\.cts|js\.map|schema\.json)$/.test(name))).toEqual([]);
   const withPaths = files.filter((name) => readFileSync(join(folder, "dist", name), "utf8").includes(root));
   expect(withPaths).toEqual([]);
 });
