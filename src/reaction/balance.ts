@@ -10,7 +10,7 @@ import { writeEquation } from "./write-equation.js";
 export interface BalancedEquation {
   /** In the library's own spelling. */
   readonly equation: string;
-  /** Stoichiometric numbers by label as exact whole numbers, negative on the left; species that take no part are left out. */
+  /** Exact whole stoichiometric numbers by label, negative on the left; species that take no part are left out. */
   readonly coefficients: Readonly<Record<Label, string>>;
 }
 

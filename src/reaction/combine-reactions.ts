@@ -23,23 +23,23 @@ import { firstDifference, isSameData } from "./same-data.js";
 export interface ReactionPart {
   readonly reaction: Reaction;
   /**
-   * How often the reaction runs, backwards where negative: a number, which stands for the shortest decimal that names it,
-   * or exactly as a text such as `"-1/2"`.
+   * How often the reaction runs, backwards where negative: a number, which stands for the shortest decimal that names
+   * it, or exactly as a text such as `"-1/2"`.
    */
   readonly coefficient: number | string;
 }
 
 /**
  * Adds multiples of reactions (Hess's law). The stoichiometric numbers are added exactly, species that cancel are left
- * out, and the notes say so; notes of the parts are kept. The energies of the result are the same sum of the energies of
- * the parts, computed from series that are merged anew.
+ * out, and the notes say so; notes of the parts are kept. The energies of the result are the same sum of the energies
+ * of the parts, computed from series that are merged anew.
  *
  * @param parts - 1 to 200; the reactions have to agree in the record of each label that they share
  * @returns a reaction like any other, per mole as its own equation is written
  * @throws GibbsLedgerError "reaction/different-records" where a label stands for two records, "reaction/trivial" where
  * everything cancels, "reaction/empty", "reaction/syntax" for a text that is no fraction,
- * "reaction/coefficient-out-of-range", "reaction/too-many-species", "species/mixed-conventions", and the faults of wrong
- * reactions, all at once
+ * "reaction/coefficient-out-of-range", "reaction/too-many-species", "species/mixed-conventions", and the faults of
+ * wrong reactions, all at once
  * @example
  * import { referenceData } from "gibbs-ledger/data";
  * const shift = combineReactions([
@@ -164,10 +164,12 @@ function checkSame(known: Map<Label, Met>, { substance, path }: Met, faults: Fau
   const before = known.get(label);
   if (before === undefined) known.set(label, { substance, path });
   if (before === undefined || isSameData(before.substance, substance)) return;
+  const place = before.path.join(".");
+  const member = firstDifference(before.substance, substance);
   faults.push({
     code: "reaction/different-records",
     path,
-    message: `${cut(label, 60)} stands for another record here than at ${before.path.join(".")}: ${firstDifference(before.substance, substance)} differs`,
+    message: `${cut(label, 60)} stands for another record here than at ${place}: ${member} differs`,
     received: cut(label),
     expected: "one record for each label",
     hint: "read all reactions against one collection",

@@ -1,5 +1,6 @@
 import { exactSum } from "../numeric/compensated.js";
 import type { Quantity } from "../quantity/quantity.js";
+import { combineUncertainties } from "../uncertainty/combine-uncertainties.js";
 import { type LedgerEntry, tagged } from "./ledger-entry.js";
 
 /** Sum of the entries of a group, with the standard uncertainty as far as it is known. */
@@ -9,19 +10,19 @@ export interface LedgerSum {
   readonly uncertaintyIsLowerBound: boolean;
 }
 
-/** Sums entries. Those of one datum add with their signs; data are independent of each other and add in quadrature. */
+/** Sums entries. Those of one datum stand or fall together; data are independent of each other. */
 export function sumOfEntries(entries: readonly LedgerEntry[]): LedgerSum {
-  const byDatum = new Map<string, number>();
-  let known = 0;
-  entries.forEach(({ value: { standardUncertainty: u }, coefficient, datum }, index) => {
-    if (u === undefined) return;
-    known += 1;
-    const key = datum ?? `entry ${index}`;
-    byDatum.set(key, (byDatum.get(key) ?? 0) + Math.sign(coefficient) * u);
-  });
-  const squares = exactSum([...byDatum.values()].map((u) => u * u));
+  const { standardUncertainty, isLowerBound } = combineUncertainties(
+    entries.map(({ value: { standardUncertainty: u }, coefficient, datum }, index) => {
+      const own = `entry ${index}`;
+      // The entry's own uncertainty is the sensitivity to a datum of uncertainty 1; unknown ones never cancel.
+      return u === undefined
+        ? { datum: own, sensitivity: 1 }
+        : { datum: datum ?? own, sensitivity: Math.sign(coefficient) * u, standardUncertainty: 1 };
+    }),
+  );
   return {
-    value: tagged(exactSum(entries.map(({ value }) => value.value)), Math.sqrt(squares)),
-    uncertaintyIsLowerBound: known < entries.length,
+    value: tagged(exactSum(entries.map(({ value }) => value.value)), standardUncertainty),
+    uncertaintyIsLowerBound: isLowerBound,
   };
 }

@@ -42,7 +42,8 @@ export function speciesCollection(data: CollectionData): CollectionData {
 
 /**
  * The species that a text names: by label (`NH3(g)`), by CAS Registry Number, by formula where the collection holds
- * only one such phase (`NH3`, `CaCO3(s)`), or by name (`ammonia`).
+ * only one such phase (`NH3`, `CaCO3(s)`), or by name (`ammonia`). A text without a state means a phase of the substance
+ * itself, where there is one, and not the dissolved substance.
  *
  * @returns the house's own copy of the record
  * @throws GibbsLedgerError "species/not-found", "species/ambiguous" with the choices listed

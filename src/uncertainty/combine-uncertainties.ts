@@ -106,10 +106,11 @@ function gather(contributions: readonly UncertaintyContribution[]): Map<string, 
     }
     known.sensitivities.push(sensitivity);
     if (known.standardUncertainty === standardUncertainty) return;
+    const [above, here] = [known.standardUncertainty, standardUncertainty].map((u) => u ?? "unknown");
     faults.push({
       code: "uncertainty/inconsistent-datum",
       path: ["contributions", index, "standardUncertainty"],
-      message: `${describeReceived(datum)} has the standard uncertainty ${known.standardUncertainty ?? "unknown"} above and ${standardUncertainty ?? "unknown"} here`,
+      message: `${describeReceived(datum)} has the standard uncertainty ${above} above and ${here} here`,
       received: String(standardUncertainty),
       expected: "the same wherever the datum enters",
       hint: "put what differs into the sensitivity, or name two data",

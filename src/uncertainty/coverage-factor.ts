@@ -4,8 +4,8 @@ import { checkNumber } from "../errors/input.js";
 import { centralQuantile } from "./central-quantile.js";
 
 /**
- * Coverages that are the rounded ones of one, two and three standard deviations. Evaluators who publish 95 per cent mean
- * a factor of two.
+ * Coverages that are the rounded ones of one, two and three standard deviations. Evaluators who publish 95 per cent
+ * mean a factor of two.
  */
 const wholeFactors: readonly (readonly [coverage: number, factor: number])[] = [
   [0.68, 1],
