@@ -252,5 +252,6 @@ export const referenceData: CollectionData = {
     Al_OH_3_cr_gibbsite,
     P_cr_white,
   ],
-  sequences: [...solidSequences, ...elementSequences],
+  // A marked call: bundlers keep a spread, and with it every record, even where nothing uses it.
+  sequences: /* @__PURE__ */ solidSequences.concat(elementSequences),
 };
