@@ -4,6 +4,7 @@ import type { SeriesPlan } from "../heat-capacity/merge.js";
 import type { RangePolicy } from "../heat-capacity/range-policy.js";
 import { exactSum } from "../numeric/compensated.js";
 import type { Figure } from "../quantity/figure.js";
+import { isSameSource } from "../references/is-same-source.js";
 import type { Source } from "../references/source.js";
 import type { SpeciesRecord } from "../species/record.js";
 import { openingRecord, phaseAt, standardPressureShift, substancePlan } from "../species/substance-function.js";
@@ -97,9 +98,4 @@ function sourceOf({ gibbsFunction, formationEnthalpy }: SpeciesRecord): { readon
 function secondSource(record: SpeciesRecord, figure: Figure | undefined): { readonly secondSource?: Source } {
   const first = sourceOf(record).source;
   return figure === undefined || isSameSource(figure.source, first) ? {} : { secondSource: figure.source };
-}
-
-/** Sources in a user's own words are the same where the words are. */
-function isSameSource(a: Source, b: Source | undefined): boolean {
-  return typeof a === "object" && typeof b === "object" ? a.text === b.text : a === b;
 }

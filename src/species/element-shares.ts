@@ -9,6 +9,7 @@ import {
   type Rational,
   rational,
 } from "../numeric/rational.js";
+import { isSameSource } from "../references/is-same-source.js";
 import type { Source } from "../references/source.js";
 import { partsOf } from "./collection-index.js";
 import type { CollectionData, PhaseSequence } from "./record.js";
@@ -65,7 +66,7 @@ function referencePlaces(
 ): readonly number[] {
   const all = given.flatMap(({ label }, place) => (elementOfReference(label) === element ? [place] : []));
   if (elementSource === undefined || all.length < 2) return all;
-  return all.filter((place) => isSource(given[place]!.source, elementSource));
+  return all.filter((place) => isSameSource(given[place]!.source, elementSource));
 }
 
 /** The element whose reference sequence a label names; undefined for other sequences. */
@@ -74,10 +75,6 @@ export function elementOfReference(label: string): string | undefined {
   if (parts === undefined || parts.state !== undefined || parts.chargeNumber !== 0) return undefined;
   const elements = Object.keys(formula(parts.formula).exactCounts);
   return elements.length === 1 ? elements[0] : undefined;
-}
-
-function isSource(a: Source, b: Source): boolean {
-  return typeof a === "object" && typeof b === "object" ? a.text === b.text : a === b;
 }
 
 function noOneReference(given: readonly PhaseSequence[], places: readonly number[], element: string): Fault {
