@@ -64,10 +64,17 @@ export function tabulatedEntropy(record: SpeciesRecord, witness: Witness): numbe
   return largestOfRows(record, witness, (temperatureK) => propertiesOf(record, temperatureK).entropy);
 }
 
-/** The largest deviation of H(T) - H(298.15 K) from the rows of a table, named as "500 K"; J/mol. */
+/**
+ * The largest deviation of H(T) - H(298.15 K) from the rows of a table, named as "500 K"; J/mol. The row "0 K" is held to
+ * the record's H(298.15 K) - H(0 K).
+ */
 export function tabulatedEnthalpyIncrement(record: SpeciesRecord, witness: Witness): number {
   const reference = propertiesOf(record, referenceTemperatureK).enthalpy;
-  return largestOfRows(record, witness, (temperatureK) => propertiesOf(record, temperatureK).enthalpy - reference);
+  return largestOfRows(record, witness, (temperatureK) =>
+    temperatureK === 0
+      ? -requiredFigure(record, witness.check, "enthalpyAbove0K", record.enthalpyAbove0K)
+      : propertiesOf(record, temperatureK).enthalpy - reference,
+  );
 }
 
 /** S of the fit less S from molecular constants, the largest over 298.15, 500, 1000, ... K in the range; J/mol/K. */

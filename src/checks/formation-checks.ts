@@ -9,7 +9,7 @@ import { formationGibbsEnergyAtStandardPressure } from "../standard-state/format
 import { rowsByTemperature } from "./caloric-checks.js";
 import { largest } from "./largest.js";
 import { propertiesOf } from "./properties-of.js";
-import { gasesFormed, sumOver, termsOf } from "./reaction-terms.js";
+import { gasesFormed, sumOver, type Term, termsOf } from "./reaction-terms.js";
 import { missing, optionalInput, requiredFigure, requiredInput } from "./witness-inputs.js";
 
 /** H(298.15 K) of the fit less the record's formation enthalpy, or the `formationEnthalpy` compared with; J/mol. */
@@ -63,13 +63,36 @@ export function formationGibbsEnergy(record: SpeciesRecord, witness: Witness, co
 
 /** Enthalpy of dissociation at 0 K from H(298.15 K) and H(298.15 K) - H(0 K), less `dissociationEnergy`; J/mol. */
 export function dissociationEnergy(record: SpeciesRecord, witness: Witness, collection: CollectionData): number {
-  const computed = sumOver(
-    termsOf(record, witness, collection),
-    (species) =>
-      propertiesOf(species, referenceTemperatureK).enthalpy -
-      requiredFigure(species, witness.check, "enthalpyAbove0K", species.enthalpyAbove0K),
-  );
-  return computed - requiredInput(record, witness, "dissociationEnergy");
+  const terms = termsOf(record, witness, collection);
+  const atReference = sumOver(terms, (species) => propertiesOf(species, referenceTemperatureK).enthalpy);
+  return atReference - incrementOf(terms, witness) - requiredInput(record, witness, "dissociationEnergy");
+}
+
+/**
+ * Enthalpy of formation at 0 K from that at 298.15 K and H(298.15 K) - H(0 K) of species and elements, less the
+ * published `formationEnthalpyAt0K`; J/mol. The reaction forms one mole of the species from the reference phases of its
+ * elements. With the `formationEnthalpy` at 298.15 K of the same publication, what is compared is their difference, and
+ * so the increments alone. Of a species without record, the reaction names the elements alone, and `enthalpyAbove0K` is
+ * its increment.
+ */
+export function formationEnthalpyAtZero(record: SpeciesRecord, witness: Witness, collection: CollectionData): number {
+  const terms = termsOf(record, witness, collection);
+  const ofUnrecorded = optionalInput(witness, "enthalpyAbove0K");
+  const formed = terms.flatMap(([, stoichiometricNumber]) => (stoichiometricNumber > 0 ? [stoichiometricNumber] : []));
+  if (ofUnrecorded === undefined ? formed.length !== 1 || formed[0] !== 1 : formed.length > 0) {
+    return missing(record, witness.check, "the formation of one mole, or elements alone beside enthalpyAbove0K");
+  }
+  const atReference =
+    ofUnrecorded === undefined && witness.against?.["formationEnthalpy"] === undefined
+      ? sumOver(terms, (species) => propertiesOf(species, referenceTemperatureK).enthalpy)
+      : requiredInput(record, witness, "formationEnthalpy");
+  const increment = (ofUnrecorded ?? 0) + incrementOf(terms, witness);
+  return atReference - increment - requiredInput(record, witness, "formationEnthalpyAt0K");
+}
+
+/** H(298.15 K) - H(0 K) of a reaction. */
+function incrementOf(terms: readonly Term[], { check }: Witness): number {
+  return sumOver(terms, (species) => requiredFigure(species, check, "enthalpyAbove0K", species.enthalpyAbove0K));
 }
 
 /**

@@ -306,6 +306,25 @@ export const K_cr: SpeciesRecord = {
       over: [336.53, 336.53],
       source: "dinsdale1991",
     },
+    {
+      group: "caloric",
+      kind: "transcription",
+      check: "formation-enthalpy-at-0-K",
+      against: {
+        formationEnthalpy: { value: 89.000, unit: "kJ/mol", source: "chase1998", origin: "memory" },
+        formationEnthalpyAt0K: {
+          value: 21.48,
+          unit: "kcal_th/mol",
+          source: "chase1998",
+          origin: "memory",
+          where: "recalled in kcal/mol, rounded to 0.01",
+        },
+      },
+      reaction: { "K(cr)": -1, "K(g)": 1 },
+      deviation: 18.68,
+      tolerance: 42,
+      source: "chase1998",
+    },
   ],
 };
 

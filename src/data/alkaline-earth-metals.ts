@@ -17,6 +17,13 @@ export const Mg_cr: SpeciesRecord = {
     source: "cox1989",
     origin: "memory",
   },
+  enthalpyAbove0K: {
+    value: 4.998,
+    unit: "kJ/mol",
+    uncertainty: { halfWidth: 0.030, coverage: 0.95 },
+    source: "cox1989",
+    origin: "memory",
+  },
   gibbsFunction: {
     kind: "series",
     form: "gibbs-energy",
@@ -112,6 +119,28 @@ export const Mg_cr: SpeciesRecord = {
       deviation: -0.0001719,
       tolerance: 0.002,
       source: "wyckoff1963",
+    },
+    {
+      group: "caloric",
+      kind: "transcription",
+      check: "formation-enthalpy-at-0-K",
+      against: {
+        formationEnthalpy: { value: 147.100, unit: "kJ/mol", source: "chase1998", origin: "memory" },
+        formationEnthalpyAt0K: { value: 145.901, unit: "kJ/mol", source: "chase1998", origin: "memory" },
+      },
+      reaction: { "Mg(cr)": -1, "Mg(g)": 1 },
+      deviation: 0,
+      tolerance: 32,
+      source: "chase1998",
+    },
+    {
+      group: "caloric",
+      kind: "transcription",
+      check: "tabulated-enthalpy-increment",
+      against: { "0 K": { value: -4.998, unit: "kJ/mol", source: "chase1998", origin: "memory" } },
+      deviation: 0,
+      tolerance: 30,
+      source: "chase1998",
     },
   ],
 };
@@ -249,6 +278,13 @@ export const Ca_cr_alpha: SpeciesRecord = {
     source: "cox1989",
     origin: "memory",
   },
+  enthalpyAbove0K: {
+    value: 5.736,
+    unit: "kJ/mol",
+    uncertainty: { halfWidth: 0.040, coverage: 0.95 },
+    source: "cox1989",
+    origin: "memory",
+  },
   gibbsFunction: {
     kind: "series",
     form: "gibbs-energy",
@@ -325,6 +361,25 @@ export const Ca_cr_alpha: SpeciesRecord = {
       tolerance: 0.5,
       over: [716, 716],
       source: "dinsdale1991",
+    },
+    {
+      group: "caloric",
+      kind: "transcription",
+      check: "formation-enthalpy-at-0-K",
+      against: {
+        formationEnthalpy: { value: 177.800, unit: "kJ/mol", source: "chase1998", origin: "memory" },
+        formationEnthalpyAt0K: {
+          value: 42.38,
+          unit: "kcal_th/mol",
+          source: "chase1998",
+          origin: "memory",
+          where: "recalled in kcal/mol, rounded to 0.01",
+        },
+      },
+      reaction: { "Ca(cr,alpha)": -1, "Ca(g)": 1 },
+      deviation: 21.08,
+      tolerance: 62,
+      source: "chase1998",
     },
   ],
 };

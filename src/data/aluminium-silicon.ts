@@ -102,6 +102,28 @@ export const Al_cr: SpeciesRecord = {
       tolerance: 0.002,
       source: "wyckoff1963",
     },
+    {
+      group: "caloric",
+      kind: "transcription",
+      check: "formation-enthalpy-at-0-K",
+      against: {
+        formationEnthalpy: { value: 329.699, unit: "kJ/mol", source: "chase1998", origin: "memory" },
+        formationEnthalpyAt0K: { value: 327.320, unit: "kJ/mol", source: "chase1998", origin: "memory" },
+      },
+      reaction: { "Al(cr)": -1, "Al(g)": 1 },
+      deviation: 0,
+      tolerance: 22,
+      source: "chase1998",
+    },
+    {
+      group: "caloric",
+      kind: "transcription",
+      check: "tabulated-enthalpy-increment",
+      against: { "0 K": { value: -4.539, unit: "kJ/mol", source: "chase1998", origin: "memory" } },
+      deviation: -1,
+      tolerance: 20,
+      source: "chase1998",
+    },
   ],
 };
 
@@ -320,6 +342,29 @@ export const Si_cr: SpeciesRecord = {
       deviation: 5.783e-5,
       tolerance: 0.002,
       source: "wyckoff1963",
+    },
+    {
+      group: "caloric",
+      kind: "transcription",
+      check: "formation-enthalpy-at-0-K",
+      against: {
+        enthalpyAbove0K: { value: 7.550, unit: "kJ/mol", source: "cox1989", origin: "memory" },
+        formationEnthalpy: { value: 450.000, unit: "kJ/mol", source: "chase1998", origin: "memory" },
+        formationEnthalpyAt0K: { value: 445.668, unit: "kJ/mol", source: "chase1998", origin: "memory" },
+      },
+      reaction: { "Si(cr)": -1 },
+      deviation: -1,
+      tolerance: 10,
+      source: "chase1998",
+    },
+    {
+      group: "caloric",
+      kind: "transcription",
+      check: "tabulated-enthalpy-increment",
+      against: { "0 K": { value: -3.217, unit: "kJ/mol", source: "chase1998", origin: "memory" } },
+      deviation: 0,
+      tolerance: 8,
+      source: "chase1998",
     },
   ],
 };

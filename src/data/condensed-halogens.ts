@@ -75,6 +75,25 @@ export const Br2_l: SpeciesRecord = {
       over: [332.503, 332.503],
       source: "chase1998",
     },
+    {
+      group: "caloric",
+      kind: "transcription",
+      check: "formation-enthalpy-at-0-K",
+      against: {
+        formationEnthalpy: { value: 111.860, unit: "kJ/mol", source: "chase1998", origin: "memory" },
+        formationEnthalpyAt0K: {
+          value: 28.18,
+          unit: "kcal_th/mol",
+          source: "chase1998",
+          origin: "memory",
+          where: "recalled in kcal/mol, rounded to 0.01",
+        },
+      },
+      reaction: { "Br2(l)": -0.5, "Br(g)": 1 },
+      deviation: 17.88,
+      tolerance: 27,
+      source: "chase1998",
+    },
   ],
 };
 
@@ -164,6 +183,41 @@ export const I2_cr: SpeciesRecord = {
       tolerance: 0.03,
       over: [298.15, 386.75],
       source: "gillespie1936",
+    },
+    {
+      group: "caloric",
+      kind: "transcription",
+      check: "formation-enthalpy-at-0-K",
+      against: {
+        formationEnthalpy: { value: 106.762, unit: "kJ/mol", source: "chase1998", origin: "memory" },
+        formationEnthalpyAt0K: { value: 107.164, unit: "kJ/mol", source: "chase1998", origin: "memory" },
+      },
+      reaction: { "I2(cr)": -0.5, "I(g)": 1 },
+      deviation: -1,
+      tolerance: 22,
+      source: "chase1998",
+    },
+    {
+      group: "caloric",
+      kind: "transcription",
+      check: "formation-enthalpy-at-0-K",
+      against: {
+        formationEnthalpy: { value: 62.421, unit: "kJ/mol", source: "chase1998", origin: "memory" },
+        formationEnthalpyAt0K: { value: 65.504, unit: "kJ/mol", source: "chase1998", origin: "memory" },
+      },
+      reaction: { "I2(cr)": -1, "I2(g)": 1 },
+      deviation: -3,
+      tolerance: 42,
+      source: "chase1998",
+    },
+    {
+      group: "caloric",
+      kind: "transcription",
+      check: "tabulated-enthalpy-increment",
+      against: { "0 K": { value: -13.198, unit: "kJ/mol", source: "chase1998", origin: "memory" } },
+      deviation: 2,
+      tolerance: 40,
+      source: "chase1998",
     },
   ],
 };

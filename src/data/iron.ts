@@ -12,7 +12,7 @@ export const Fe_cr_alpha: SpeciesRecord = {
   standardPressure: { value: 1, unit: "bar", source: "mcbride2002", origin: "memory" },
   formationEnthalpy: { value: 0, unit: "kJ/mol", source: "chase1998", origin: "memory" },
   standardEntropy: { value: 27.321, unit: "J/mol/K", source: "chase1998", origin: "memory" },
-  enthalpyAbove0K: { value: 4489, unit: "J/mol", source: "mcbride2002", origin: "memory" },
+  enthalpyAbove0K: { value: 4.507, unit: "kJ/mol", source: "chase1998", origin: "memory" },
   gibbsFunction: {
     kind: "series",
     form: "nine-coefficient",
@@ -143,6 +143,19 @@ export const Fe_cr_alpha: SpeciesRecord = {
       deviation: -8.619e-5,
       tolerance: 0.002,
       source: "wyckoff1963",
+    },
+    {
+      group: "caloric",
+      kind: "transcription",
+      check: "formation-enthalpy-at-0-K",
+      against: {
+        formationEnthalpy: { value: 415.471, unit: "kJ/mol", source: "chase1998", origin: "memory" },
+        formationEnthalpyAt0K: { value: 413.127, unit: "kJ/mol", source: "chase1998", origin: "memory" },
+      },
+      reaction: { "Fe(cr,alpha)": -1, "Fe(g)": 1 },
+      deviation: 1,
+      tolerance: 2,
+      source: "chase1998",
     },
   ],
 };

@@ -119,6 +119,15 @@ export const Pb_cr: SpeciesRecord = {
       tolerance: 0.002,
       source: "wyckoff1963",
     },
+    {
+      group: "caloric",
+      kind: "transcription",
+      check: "tabulated-enthalpy-increment",
+      against: { "0 K": { value: -6.878, unit: "kJ/mol", source: "chase1998", origin: "memory" } },
+      deviation: 8,
+      tolerance: 30,
+      source: "chase1998",
+    },
   ],
 };
 
@@ -231,6 +240,13 @@ export const Hg_l: SpeciesRecord = {
     source: "cox1989",
     origin: "memory",
   },
+  enthalpyAbove0K: {
+    value: 9.342,
+    unit: "kJ/mol",
+    uncertainty: { halfWidth: 0.008, coverage: 0.95 },
+    source: "cox1989",
+    origin: "memory",
+  },
   gibbsFunction: {
     kind: "series",
     form: "gibbs-energy",
@@ -278,6 +294,29 @@ export const Hg_l: SpeciesRecord = {
       deviation: 0.0003164,
       tolerance: 0.5,
       source: "cox1989",
+    },
+    {
+      group: "caloric",
+      kind: "transcription",
+      check: "formation-enthalpy-at-0-K",
+      against: {
+        enthalpyAbove0K: { value: 6.197, unit: "kJ/mol", source: "cox1989", origin: "memory" },
+        formationEnthalpy: { value: 61.380, unit: "kJ/mol", source: "chase1998", origin: "memory" },
+        formationEnthalpyAt0K: { value: 64.526, unit: "kJ/mol", source: "chase1998", origin: "memory" },
+      },
+      reaction: { "Hg(l)": -1 },
+      deviation: -1,
+      tolerance: 10,
+      source: "chase1998",
+    },
+    {
+      group: "caloric",
+      kind: "transcription",
+      check: "tabulated-enthalpy-increment",
+      against: { "0 K": { value: -9.343, unit: "kJ/mol", source: "chase1998", origin: "memory" } },
+      deviation: 1,
+      tolerance: 8,
+      source: "chase1998",
     },
   ],
 };

@@ -538,6 +538,13 @@ export const Al2O3_cr_corundum: SpeciesRecord = {
     source: "cox1989",
     origin: "memory",
   },
+  enthalpyAbove0K: {
+    value: 10.016,
+    unit: "kJ/mol",
+    uncertainty: { halfWidth: 0.020, coverage: 0.95 },
+    source: "cox1989",
+    origin: "memory",
+  },
   gibbsFunction: {
     kind: "series",
     form: "berman-brown",
@@ -651,6 +658,19 @@ export const Al2O3_cr_corundum: SpeciesRecord = {
       deviation: -0.0002636,
       tolerance: 0.002,
       source: "newnham1962",
+    },
+    {
+      group: "caloric",
+      kind: "transcription",
+      check: "formation-enthalpy-at-0-K",
+      against: {
+        formationEnthalpy: { value: -1675.692, unit: "kJ/mol", source: "chase1998", origin: "memory" },
+        formationEnthalpyAt0K: { value: -1663.608, unit: "kJ/mol", source: "chase1998", origin: "memory" },
+      },
+      reaction: { "Al(cr)": -2, "O2(g)": -1.5, "Al2O3(cr,corundum)": 1 },
+      deviation: 0,
+      tolerance: 64,
+      source: "chase1998",
     },
   ],
 };

@@ -18,6 +18,13 @@ export const P_cr_white: SpeciesRecord = {
     source: "cox1989",
     origin: "memory",
   },
+  enthalpyAbove0K: {
+    value: 5.360,
+    unit: "kJ/mol",
+    uncertainty: { halfWidth: 0.015, coverage: 0.95 },
+    source: "cox1989",
+    origin: "memory",
+  },
   gibbsFunction: { kind: "reference-point" },
   witnesses: [
     {
@@ -36,6 +43,26 @@ export const P_cr_white: SpeciesRecord = {
       against: { standardEntropy: { value: 41.077, unit: "J/mol/K", source: "chase1998", origin: "memory" } },
       deviation: 0.013,
       tolerance: 0.25,
+      source: "chase1998",
+    },
+    {
+      group: "caloric",
+      kind: "transcription",
+      check: "formation-enthalpy-at-0-K",
+      against: {
+        enthalpyAbove0K: { value: 6.197, unit: "kJ/mol", source: "cox1989", origin: "memory" },
+        formationEnthalpy: { value: 316.39, unit: "kJ/mol", source: "chase1998", origin: "memory" },
+        formationEnthalpyAt0K: {
+          value: 75.42,
+          unit: "kcal_th/mol",
+          source: "chase1998",
+          origin: "memory",
+          where: "recalled in kcal/mol, rounded to 0.01",
+        },
+      },
+      reaction: { "P(cr,white)": -1 },
+      deviation: -4.28,
+      tolerance: 37,
       source: "chase1998",
     },
   ],

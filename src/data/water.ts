@@ -232,6 +232,13 @@ export const H2O_l: SpeciesRecord = {
     source: "cox1989",
     origin: "memory",
   },
+  enthalpyAbove0K: {
+    value: 13.273,
+    unit: "kJ/mol",
+    uncertainty: { halfWidth: 0.020, coverage: 0.95 },
+    source: "cox1989",
+    origin: "memory",
+  },
   gibbsFunction: {
     kind: "series",
     form: "nine-coefficient",
@@ -330,6 +337,23 @@ export const H2O_l: SpeciesRecord = {
       deviation: -8.898e-5,
       tolerance: 0.001,
       source: "kell1975",
+    },
+    {
+      group: "caloric",
+      kind: "transcription",
+      check: "tabulated-enthalpy-increment",
+      against: {
+        "0 K": {
+          value: -13.276,
+          unit: "kJ/mol",
+          source: "feistel2006",
+          origin: "memory",
+          where: "liquid at 298.15 K, 104.92 kJ/kg (wagner2002), less ice at 0 K, -632.02 kJ/kg, times 18.0153 g/mol; not printed",
+        },
+      },
+      deviation: 3,
+      tolerance: 20,
+      source: "feistel2006",
     },
   ],
 };

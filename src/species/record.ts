@@ -25,6 +25,7 @@ export type WitnessCheckName =
   | "enthalpy-at-298.15-K"
   | "reaction-enthalpy"
   | "dissociation-energy"
+  | "formation-enthalpy-at-0-K"
   | "equilibrium-constant"
   | "equilibrium-pressure"
   | "reaction-entropy"

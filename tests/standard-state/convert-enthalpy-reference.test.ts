@@ -15,16 +15,16 @@ import { figure, invented, randomSeries } from "../heat-capacity/random-series.j
 import { referenceSubjects } from "../properties/reference-states.js";
 import { fitted, recordOf } from "../species/records.js";
 import { conversionBound, numbersOf } from "./conversion-bound.js";
-import { elementCollection, isOfTheseElements } from "./element-collection.js";
 
 const eps = Number.EPSILON;
 const kelvin = (value: number) => ({ temperature: { value, unit: "K" } }) as const;
-const collection = elementCollection();
+/** All but those of sodium, whose increment is not published in the data. */
+const converts = ({ formula }: SpeciesRecord): boolean => !formula.includes("Na");
 const convertAll = (given: CollectionData, reference: "0 K" | "298.15 K"): CollectionData => ({
   ...given,
-  species: given.species.filter(isOfTheseElements).map((record) => convertEnthalpyReference(record, given, reference)),
+  species: given.species.filter(converts).map((record) => convertEnthalpyReference(record, given, reference)),
 });
-const fromZero = convertAll(collection, "0 K");
+const fromZero = convertAll(referenceData, "0 K");
 const anyForm = fc.oneof(...Object.values(randomSeries));
 
 function expectSound(record: SpeciesRecord): void {
@@ -34,7 +34,7 @@ function expectSound(record: SpeciesRecord): void {
 
 describe("figures", () => {
   test("H of a species gains the increments of its elements, and says so", () => {
-    const converted = convertEnthalpyReference(CO2_g, collection, "0 K");
+    const converted = convertEnthalpyReference(CO2_g, referenceData, "0 K");
     expectSound(converted);
     expect(converted.convention).toBe(elementsAtZeroKelvin);
     // CODATA: graphite 1.050, O2 8.680 kJ/mol.
@@ -48,16 +48,16 @@ describe("figures", () => {
   });
 
   test("an element at 298.15 K has the enthalpy that it gained since 0 K, exact by convention", () => {
-    const converted = convertEnthalpyReference(H2_g, collection, "0 K");
+    const converted = convertEnthalpyReference(H2_g, referenceData, "0 K");
     expect(converted.formationEnthalpy).toMatchObject({ value: 8.468, uncertainty: { halfWidth: 0, coverage: 0.95 } });
   });
 
   test("ions follow the hydrogen convention: H^+(aq) stays at zero, OH^-(aq) gains a mole of hydrogen", () => {
-    const proton = convertEnthalpyReference(recordOf("H^+(aq)"), collection, "0 K");
+    const proton = convertEnthalpyReference(recordOf("H^+(aq)"), referenceData, "0 K");
     expectSound(proton);
     expect(proton.formationEnthalpy!.value).toBe(0);
     const hydroxide = recordOf("OH^-(aq)", { formationEnthalpy: figure(-230.015, "kJ/mol") });
-    const converted = convertEnthalpyReference(hydroxide, collection, "0 K");
+    const converted = convertEnthalpyReference(hydroxide, referenceData, "0 K");
     expect(converted.formationEnthalpy!.value).toBe(-230.015 + 8.468 + 4.34);
   });
 
@@ -70,7 +70,7 @@ describe("figures", () => {
     fc.assert(
       fc.property(randomSeries[form], (series) => {
         const record = recordOf("H2O(g)", { gibbsFunction: fitted(series) });
-        const converted = convertEnthalpyReference(record, collection, "0 K").gibbsFunction as PublishedSeries;
+        const converted = convertEnthalpyReference(record, referenceData, "0 K").gibbsFunction as PublishedSeries;
         converted.intervals[0]!.coefficients.forEach((coefficient, index) => {
           const before = series.intervals[0]!.coefficients[index]!;
           const shift = (places as readonly number[]).includes(index) ? (8468 + 4340) * perUnit : 0;
@@ -91,7 +91,7 @@ describe("figures", () => {
       intervals: [{ from: 500, to: 1700, coefficients, endsAt: "fit" }],
     } as const;
     const record = recordOf("H2O(g)", { gibbsFunction: fitted(series) });
-    const converted = convertEnthalpyReference(record, collection, "0 K").gibbsFunction as PublishedSeries;
+    const converted = convertEnthalpyReference(record, referenceData, "0 K").gibbsFunction as PublishedSeries;
     expect(converted.intervals[0]!.coefficients).toEqual([30, 0, 0, 0, 0, -250 + 12.808, 220, -241.826 + 12.808]);
   });
 });
@@ -101,7 +101,7 @@ describe("properties", () => {
     fc.assert(
       fc.property(anyForm, fc.constantFrom("H2O(g)", "H2O(l)"), (series, label) => {
         const record = recordOf(label, { gibbsFunction: fitted(series) });
-        const converted = convertEnthalpyReference(record, collection, "0 K");
+        const converted = convertEnthalpyReference(record, referenceData, "0 K");
         expectSound(converted);
         const [before, after] = [record, converted].map((each) => standardProperties(each, kelvin(1000)));
         expect(after!.entropy).toEqual(before!.entropy);
@@ -116,7 +116,7 @@ describe("properties", () => {
   test("K of every reaction stays when all its species are converted", () => {
     const equations = [...referenceSubjects.map(({ equation }) => equation), "H2O(l) = H2O(g)", "H2 + ½ O2 = H2O(l)"];
     for (const equation of equations) {
-      const [before, after] = [collection, fromZero].map((each) => reaction(equation, each));
+      const [before, after] = [referenceData, fromZero].map((each) => reaction(equation, each));
       for (const temperatureK of [298.15, 350, 500, 600]) {
         const { lnK } = standardReactionProperties(before!, kelvin(temperatureK));
         const bound = standardReactionRoundingBound(before!, "gibbsEnergy", kelvin(temperatureK));
@@ -130,7 +130,7 @@ describe("properties", () => {
 
   test("and so does the Gibbs energy of formation", () => {
     for (const label of ["H2O(g)", "CO2(g)", "NH3(g)", "SO2(g)"]) {
-      const [before, after] = [collection, fromZero].map((each) => {
+      const [before, after] = [referenceData, fromZero].map((each) => {
         const record = each.species.find((species) => species.label === label)!;
         return formationProperties(record, kelvin(298.15), each).gibbsEnergy.value;
       });
@@ -142,16 +142,17 @@ describe("properties", () => {
     const labels = new Set(fromZero.species.map(({ label }) => label));
     let compared = 0;
     for (const record of fromZero.species) {
-      const original = collection.species.find(({ label }) => label === record.label);
+      const original = referenceData.species.find(({ label }) => label === record.label);
       original?.witnesses.forEach((witness, place) => {
-        // Reactions with species of further elements are left out.
+        // Reactions with electrons or species of sodium are left out.
         if (!Object.keys(witness.reaction ?? {}).every((label) => labels.has(label))) return;
         const [before, after] = [
-          computeWitness(original, witness, collection),
+          computeWitness(original, witness, referenceData),
           computeWitness(record, record.witnesses[place]!, fromZero),
         ];
-        // Differences of energies of 1e6 J/mol, rounded to 1e-9.
-        expect(Math.abs(after - before)).toBeLessThan(1e-8);
+        // Differences of energies of 1e6 J/mol, rounded to 1e-9; the terms of alpha iron reach 1e8 J/mol.
+        const isStiff = record.label === "Fe(cr,alpha)" || witness.reaction?.["Fe(cr,alpha)"] !== undefined;
+        expect(Math.abs(after - before)).toBeLessThan(isStiff ? 1e-6 : 1e-8);
         compared += 1;
       });
     }
@@ -177,8 +178,8 @@ describe("there and back", () => {
           formationEnthalpy: figure(enthalpy / 1000, "kcal_th/mol"),
           gibbsFunction: fitted(series),
         });
-        const there = convertEnthalpyReference(record, collection, "0 K");
-        const back = convertEnthalpyReference(there, collection, "298.15 K");
+        const there = convertEnthalpyReference(record, referenceData, "0 K");
+        const back = convertEnthalpyReference(there, referenceData, "298.15 K");
         expect(back.convention).toBeUndefined();
         const [before, between, after] = [record, there, back].map((each) => numbersOf(each));
         for (const [path, value] of before!) {
@@ -194,7 +195,7 @@ describe("there and back", () => {
     const back = convertAll(fromZero, "298.15 K");
     for (const [index, record] of back.species.entries()) {
       expect(record.convention).toBeUndefined();
-      const original = collection.species.filter(isOfTheseElements)[index]!;
+      const original = referenceData.species.filter(converts)[index]!;
       const [was, is] = [original.formationEnthalpy, record.formationEnthalpy];
       if (was !== undefined)
         expect(Math.abs(is!.value - was.value)).toBeLessThanOrEqual(eps * (Math.abs(was.value) + 60_000));
@@ -202,9 +203,9 @@ describe("there and back", () => {
   });
 
   test("a record that has the reference is returned as it is", () => {
-    expect(convertEnthalpyReference(H2O_g, collection, "298.15 K")).toEqual(H2O_g);
-    const converted = convertEnthalpyReference(H2O_g, collection, "0 K");
-    expect(convertEnthalpyReference(converted, collection, "0 K")).toEqual(converted);
+    expect(convertEnthalpyReference(H2O_g, referenceData, "298.15 K")).toEqual(H2O_g);
+    const converted = convertEnthalpyReference(H2O_g, referenceData, "0 K");
+    expect(convertEnthalpyReference(converted, referenceData, "0 K")).toEqual(converted);
   });
 
   test("the figure of another source that a witness compares with moves with the record", () => {
@@ -217,18 +218,18 @@ describe("there and back", () => {
       tolerance: 40,
       source: invented,
     } as const;
-    const { witnesses } = convertEnthalpyReference(recordOf("H2O(g)", { witnesses: [witness] }), collection, "0 K");
+    const { witnesses } = convertEnthalpyReference(recordOf("H2O(g)", { witnesses: [witness] }), referenceData, "0 K");
     expect(witnesses[0]!.against!["formationEnthalpy"]!.value).toBeCloseTo(-57.796 + 12.808 / 4.184, 12);
   });
 });
 
 test("wrong input is refused, all faults together", () => {
-  expect(placesOf(() => convertEnthalpyReference({ ...H2O_g, name: "" }, collection, "25 C" as never))).toEqual([
+  expect(placesOf(() => convertEnthalpyReference({ ...H2O_g, name: "" }, referenceData, "25 C" as never))).toEqual([
     "input/not-a-string at record.name",
     "input/unknown-option at reference",
   ]);
   const other = { ...H2O_g, convention: "absolute enthalpies" };
-  expect(placesOf(() => convertEnthalpyReference(other, { ...collection, sequences: [] }, "0 K"))).toEqual([
+  expect(placesOf(() => convertEnthalpyReference(other, { ...referenceData, sequences: [] }, "0 K"))).toEqual([
     "standard-state/other-convention at record.convention",
     "species/no-reference at collection.sequences",
     "species/no-reference at collection.sequences",
@@ -236,7 +237,7 @@ test("wrong input is refused, all faults together", () => {
   expect(placesOf(() => convertEnthalpyReference(H2O_g, null as never, "0 K"))).toEqual([
     "input/not-an-object at collection",
   ]);
-  expect(placesOf(() => convertEnthalpyReference(H2O_g, collection, "0 K", { source: 1 } as never))).toEqual([
+  expect(placesOf(() => convertEnthalpyReference(H2O_g, referenceData, "0 K", { source: 1 } as never))).toEqual([
     "input/unknown-key at options.source",
   ]);
 });
