@@ -34,9 +34,14 @@ function define(container: object, key: string | number, value: unknown): void {
   Object.defineProperty(container, key, { value, enumerable: true, writable: true, configurable: true });
 }
 
-function placesIn(value: unknown): Place[] {
-  if (!isContainer(value)) return [];
-  return Object.keys(value).flatMap((key) => [{ container: value, key }, ...placesIn(value[key])]);
+/** All places, outer ones first; one array is filled, for records have thousands. */
+function placesIn(value: unknown, places: Place[] = []): Place[] {
+  if (!isContainer(value)) return places;
+  for (const key of Object.keys(value)) {
+    places.push({ container: value, key });
+    placesIn(value[key], places);
+  }
+  return places;
 }
 
 /** A change of one kind at a place; the number chooses among the ways to do it. */

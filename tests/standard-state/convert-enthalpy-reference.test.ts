@@ -79,7 +79,7 @@ describe("figures", () => {
           expect(Math.abs(coefficient - before - shift * power)).toBeLessThanOrEqual(allowed);
         });
       }),
-      { seed: 20261215, numRuns: 200 },
+      { seed: 20261215, numRuns: 60 },
     );
   });
 
@@ -109,7 +109,7 @@ describe("properties", () => {
         const error = Math.abs(after!.enthalpy.value - before!.enthalpy.value - 12808);
         expect(error).toBeLessThanOrEqual(conversionBound(record, converted, "enthalpy", 1000) + 2 * eps * 12808);
       }),
-      { seed: 20261216, numRuns: 300 },
+      { seed: 20261216, numRuns: 120 },
     );
   });
 
@@ -144,6 +144,9 @@ describe("properties", () => {
     for (const record of fromZero.species) {
       const original = referenceData.species.find(({ label }) => label === record.label);
       original?.witnesses.forEach((witness, place) => {
+        // Molecules, cells and volumes know nothing of where enthalpies are counted from.
+        if (witness.group === "critical" || witness.group === "volume") return;
+        if (witness.check.startsWith("statistical-mechanics")) return;
         // Reactions with electrons or species of sodium are left out.
         if (!Object.keys(witness.reaction ?? {}).every((label) => labels.has(label))) return;
         const [before, after] = [
@@ -187,7 +190,7 @@ describe("there and back", () => {
           expect(Math.abs(after!.get(path)! - value)).toBeLessThanOrEqual(eps * larger);
         }
       }),
-      { seed: 20261217, numRuns: 300 },
+      { seed: 20261217, numRuns: 120 },
     );
   });
 
